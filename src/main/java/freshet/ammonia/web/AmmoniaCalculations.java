@@ -1,0 +1,44 @@
+package freshet.ammonia.web;
+
+import freshet.ammonia.AmmoniaMethod;
+import freshet.ammonia.AmmoniaSpeciation;
+import freshet.answer.Answer;
+import freshet.http.Calculation;
+import freshet.method.Method;
+import java.util.Arrays;
+import java.util.List;
+import org.springframework.context.annotation.Bean;
+import org.springframework.context.annotation.Configuration;
+
+/** The calculations of this topic. */
+@Configuration(proxyBeanMethods = false)
+class AmmoniaCalculations {
+
+    private static final List<Method> DISSOCIATION_METHODS = Arrays.stream(AmmoniaMethod.values())
+            .map(choice -> choice.dissociation().method())
+            .toList();
+
+    @Bean
+    Calculation<AmmoniaSpeciationRequest, AmmoniaSpeciationResponse> ammoniaSpeciation() {
+        return Calculation.of(
+                        "ammonia/speciation",
+                        AmmoniaSpeciationRequest.class,
+                        AmmoniaSpeciationResponse.class,
+                        AmmoniaCalculations::speciation)
+                .describedAs(
+                        "How much of the total ammonia is the toxic un-ionized form",
+                        "An error of 0.1 in pH is an error of about 25 % in NH3: calibrate the probe.")
+                .using(DISSOCIATION_METHODS)
+                .shownBy("tan_mg_per_l=1.2&ph=8.1&temperature_c=26");
+    }
+
+    private static Answer<AmmoniaSpeciationResponse> speciation(AmmoniaSpeciationRequest request) {
+        DissociationChoice choice = DissociationChoice.of(request.sample(), request.method());
+        AmmoniaSpeciation speciation = AmmoniaSpeciation.of(request.tanMgPerL(), choice.water(), choice.dissociation());
+        return new Answer<>(
+                AmmoniaSpeciationResponse.of(speciation),
+                choice.dissociation().method(),
+                choice.validity(),
+                choice.notices());
+    }
+}

@@ -1,0 +1,120 @@
+package freshet.http;
+
+import freshet.answer.Answer;
+import freshet.answer.Fault;
+import freshet.answer.FaultCode;
+import freshet.answer.Notice;
+import freshet.answer.Refusal;
+import freshet.http.binding.Controls;
+import freshet.http.binding.Request;
+import freshet.http.caching.EntityTag;
+import freshet.http.limits.Sizes;
+import freshet.http.media.Bytes;
+import freshet.http.media.JsonWriter;
+import freshet.http.media.Negotiation;
+import freshet.http.media.SixDigits;
+import freshet.method.Method;
+import freshet.method.Range;
+import jakarta.servlet.http.HttpServletRequest;
+import jakarta.servlet.http.HttpServletResponse;
+import java.io.IOException;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.springframework.http.MediaType;
+
+/** One calculation as HTTP reaches it: GET with a query, POST with a JSON object. */
+final class Endpoint<I extends Record, O extends Record> {
+
+    private static final String OPENAPI_LINK = "</openapi.yaml>; rel=\"service-desc\"";
+
+    private final Calculation<I, O> calculation;
+    private final JsonWriter writer;
+    private final long tagSeed;
+
+    Endpoint(Calculation<I, O> calculation, String release) {
+        this.calculation = calculation;
+        writer = new JsonWriter(calculation.outputs());
+        tagSeed = EntityTag.seed(calculation.path(), calculation.methods(), release);
+    }
+
+    void get(HttpServletRequest request, HttpServletResponse response) throws IOException {
+        Request<I> read = Request.fromQuery(calculation.inputs(), request.getQueryString());
+        accept(request, read.controls());
+        String tag = EntityTag.of(tagSeed, read.fingerprint(), read.controls().compact());
+        String known = request.getHeader("If-None-Match");
+        boolean unchanged = known != null && !read.controls().strict() && EntityTag.matches(known, tag);
+        Bytes body = unchanged ? new Bytes(0) : compute(read, response);
+        response.setHeader("ETag", tag);
+        response.setHeader("Cache-Control", "public, max-age=300");
+        response.setHeader("Vary", "Accept");
+        if (unchanged) {
+            response.setStatus(HttpServletResponse.SC_NOT_MODIFIED);
+        } else {
+            send(body, request, response);
+        }
+    }
+
+    void post(HttpServletRequest request, HttpServletResponse response) throws IOException {
+        Negotiation.checkContentType(request);
+        Request<I> read = Request.fromJson(calculation.inputs(), Sizes.body(request), request.getQueryString());
+        accept(request, read.controls());
+        Bytes body = compute(read, response);
+        response.setHeader("Cache-Control", "no-store");
+        send(body, request, response);
+    }
+
+    private static void accept(HttpServletRequest request, Controls controls) {
+        if (controls.format() == null) {
+            Negotiation.checkAccept(request.getHeader("Accept"));
+        }
+    }
+
+    private Bytes compute(Request<I> read, HttpServletResponse response) {
+        Answer<O> answer = calculation.function().apply(read.inputs());
+        boolean compact = read.controls().compact();
+        if (answer.validity().within()) {
+            return link(answer.method(), compact, response, writer.write(answer, compact));
+        }
+        if (read.controls().strict()) {
+            throw new Refusal(answer.validity().exceeded().stream()
+                    .map(Endpoint::outsideValidity)
+                    .toList());
+        }
+        return link(answer.method(), compact, response, writer.write(noticed(answer), compact));
+    }
+
+    private static Bytes link(Method method, boolean compact, HttpServletResponse response, Bytes body) {
+        if (!compact) {
+            response.setHeader("Link", "</v1/methods/" + method.id() + ">; rel=\"describedby\", " + OPENAPI_LINK);
+        }
+        return body;
+    }
+
+    private static void send(Bytes body, HttpServletRequest request, HttpServletResponse response) throws IOException {
+        response.setContentType(MediaType.APPLICATION_JSON_VALUE);
+        response.setContentLength(body.length());
+        if (!"HEAD".equals(request.getMethod())) {
+            response.getOutputStream().write(body.array(), 0, body.length());
+        }
+    }
+
+    private static <R extends Record> Answer<R> noticed(Answer<R> answer) {
+        List<Notice> notices = new ArrayList<>();
+        for (Range range : answer.validity().exceeded()) {
+            notices.add(new Notice("outside-validity", range.quantity(), stated(range)));
+        }
+        notices.addAll(answer.notices());
+        return new Answer<>(answer.result(), answer.method(), answer.validity(), notices);
+    }
+
+    private static Fault outsideValidity(Range range) {
+        return new Fault(range.quantity(), FaultCode.OUTSIDE_VALIDITY, stated(range))
+                .bounds(OptionalDouble.of(range.minimum()), OptionalDouble.of(range.maximum()), range.unit());
+    }
+
+    private static String stated(Range range) {
+        return "The source of the method holds for " + range.quantity() + " " + SixDigits.text(range.minimum()) + " to "
+                + SixDigits.text(range.maximum()) + " (" + range.unit() + ").";
+    }
+}

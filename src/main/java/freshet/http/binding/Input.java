@@ -1,0 +1,85 @@
+package freshet.http.binding;
+
+import freshet.quantity.Unit;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * One input of a calculation, as its request record declares it.
+ *
+ * @param index its place among the inputs of the request
+ * @param kind what kind of value it takes
+ * @param meaning what it is
+ * @param example a typical value
+ * @param minimum least value in the canonical unit
+ * @param maximum greatest value in the canonical unit
+ * @param required whether it must be given
+ * @param defaultText the value when it is not given
+ * @param spellings the names it may be given by, the canonical one first
+ * @param choices the enumerated values by name; empty unless the kind is a choice
+ */
+public record Input(
+        int index,
+        Kind kind,
+        String meaning,
+        String example,
+        double minimum,
+        double maximum,
+        boolean required,
+        Optional<String> defaultText,
+        List<Spelling> spellings,
+        Map<String, Object> choices) {
+
+    /** The kinds of values. */
+    public enum Kind {
+        /** A number. */
+        NUMBER,
+        /** A whole number. */
+        WHOLE,
+        /** True or false. */
+        FLAG,
+        /** One of an enumeration. */
+        CHOICE
+    }
+
+    /** The canonical name. */
+    public String name() {
+        return spellings.get(0).name();
+    }
+
+    /** The canonical unit. */
+    public Unit unit() {
+        return spellings.get(0).unit();
+    }
+
+    /** Whether it takes a number. */
+    public boolean numeric() {
+        return kind == Kind.NUMBER || kind == Kind.WHOLE;
+    }
+
+    /** All names it may be given by, joined by "or". */
+    public String anyName() {
+        return spellings.stream().map(Spelling::name).collect(Collectors.joining(" or "));
+    }
+
+    /** The names of the enumerated values. */
+    public List<String> allowed() {
+        return List.copyOf(choices.keySet());
+    }
+
+    /** The value when it is not given; null if there is none. */
+    @Nullable
+    Object defaultValue() {
+        return defaultText
+                .map(text -> switch (kind) {
+                    case NUMBER -> Double.valueOf(text);
+                    case WHOLE -> Integer.valueOf(text);
+                    case FLAG -> Boolean.valueOf(text);
+                    case CHOICE -> choices.get(text);
+                })
+                .orElse(null);
+    }
+}

@@ -1,0 +1,115 @@
+package freshet.http.binding;
+
+import freshet.quantity.AtMostOneOf;
+import freshet.quantity.ExactlyOneOf;
+import freshet.quantity.Flat;
+import freshet.quantity.Together;
+import java.lang.reflect.RecordComponent;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * What a request record declares, read once: its inputs, the names they may be given by, and the rules between them.
+ *
+ * @param <T> the request record
+ */
+public final class Shape<T extends Record> {
+
+    /** A name and the input it gives. */
+    record Entry(Input input, Spelling spelling) {}
+
+    private final RecordMaker<T> maker;
+    private final List<Input> inputs = new ArrayList<>();
+    private final Map<String, Entry> entries = new LinkedHashMap<>();
+    private final List<Rule> rules = new ArrayList<>();
+    private final @Nullable Object[] defaults;
+
+    private Shape(Class<T> type) {
+        maker = read(type);
+        inputs.forEach(input -> input.spellings().forEach(spelling -> {
+            if (entries.put(spelling.name(), new Entry(input, spelling)) != null) {
+                throw new IllegalStateException("Two inputs are called " + spelling.name());
+            }
+        }));
+        rules.forEach(rule -> rule.names().forEach(this::input));
+        defaults = inputs.stream().map(Input::defaultValue).toArray();
+    }
+
+    /**
+     * Reads a request record.
+     *
+     * @throws IllegalStateException if it bears an annotation that is not understood
+     */
+    public static <T extends Record> Shape<T> of(Class<T> type) {
+        return new Shape<>(type);
+    }
+
+    /** The inputs in the order in which the record declares them. */
+    public List<Input> inputs() {
+        return Collections.unmodifiableList(inputs);
+    }
+
+    /** The rules between the inputs. */
+    public List<Rule> rules() {
+        return Collections.unmodifiableList(rules);
+    }
+
+    /** All names by which an input may be given. */
+    public Set<String> names() {
+        return entries.keySet();
+    }
+
+    /** The input with this canonical name. */
+    public Input input(String name) {
+        Entry entry = entries.get(name);
+        if (entry == null) {
+            throw new IllegalStateException("No input is called " + name);
+        }
+        return entry.input();
+    }
+
+    @Nullable
+    Entry entry(String name) {
+        return entries.get(name);
+    }
+
+    /** The values when nothing is given, a new array each time. */
+    @Nullable
+    Object[] defaults() {
+        return defaults.clone();
+    }
+
+    T create(@Nullable Object[] values) {
+        return maker.create(values);
+    }
+
+    private <R extends Record> RecordMaker<R> read(Class<R> type) {
+        Arrays.stream(type.getAnnotationsByType(ExactlyOneOf.class))
+                .forEach(group -> rules.add(new Rule(Rule.Kind.EXACTLY_ONE, List.of(group.value()))));
+        Arrays.stream(type.getAnnotationsByType(AtMostOneOf.class))
+                .forEach(group -> rules.add(new Rule(Rule.Kind.AT_MOST_ONE, List.of(group.value()))));
+        Arrays.stream(type.getAnnotationsByType(Together.class))
+                .forEach(pair -> rules.add(new Rule(Rule.Kind.TOGETHER, List.of(pair.given(), pair.needs()))));
+        List<RecordMaker.Part> parts = new ArrayList<>();
+        for (RecordComponent component : type.getRecordComponents()) {
+            parts.add(component.isAnnotationPresent(Flat.class) ? nested(component) : leaf(component));
+        }
+        return new RecordMaker<>(type, parts);
+    }
+
+    private RecordMaker.Part nested(RecordComponent component) {
+        return read(component.getType().asSubclass(Record.class))::create;
+    }
+
+    private RecordMaker.Part leaf(RecordComponent component) {
+        int index = inputs.size();
+        inputs.add(InputReader.read(component, index));
+        return values -> values[index];
+    }
+}

@@ -1,0 +1,95 @@
+package freshet.http.binding;
+
+import freshet.answer.Fault;
+import freshet.answer.FaultCode;
+import freshet.http.media.SixDigits;
+import java.util.Collection;
+import java.util.List;
+import java.util.OptionalDouble;
+
+/** The sentences in which faults of reading are told. */
+final class Wording {
+
+    private static final int LONGEST_QUOTE = 40;
+
+    private Wording() {}
+
+    static Fault missing(Input input, String name) {
+        String unit = input.numeric() ? input.unit().with(" in").strip() : "";
+        return new Fault(
+                name,
+                FaultCode.MISSING,
+                name + " is missing: " + input.meaning() + (unit.equals("in") || unit.isEmpty() ? "" : ", " + unit)
+                        + "." + (input.spellings().size() > 1 ? " Give one of " + input.anyName() + "." : ""));
+    }
+
+    static Fault repeated(String name) {
+        return new Fault(name, FaultCode.REPEATED, name + " was given more than once.");
+    }
+
+    static Fault unknown(String name, Collection<String> known) {
+        var nearest = Names.nearest(name, known);
+        return new Fault(
+                        shortened(name),
+                        FaultCode.UNKNOWN,
+                        "There is no input " + quoted(name) + " here"
+                                + nearest.map(near -> "; did you mean " + near + "?")
+                                        .orElse("."))
+                .near(nearest);
+    }
+
+    static Fault belongsInQuery(String name) {
+        return new Fault(name, FaultCode.UNKNOWN, name + " is a control: it stands in the query, not in the body.");
+    }
+
+    static Fault notNumber(String name, String text) {
+        return new Fault(
+                name,
+                FaultCode.NOT_A_NUMBER,
+                name + " is " + quoted(text) + ", not a number as RFC 8259 writes it (at most 32 characters)"
+                        + NumberText.corrected(text)
+                                .map(spelling -> "; write " + spelling + ".")
+                                .orElse("."));
+    }
+
+    static Fault notBoolean(String name, String text) {
+        return new Fault(name, FaultCode.NOT_BOOLEAN, name + " is " + quoted(text) + "; write true or false.")
+                .allowing(List.of("true", "false"));
+    }
+
+    static Fault notAllowed(String name, String text, List<String> allowed) {
+        return new Fault(
+                        name,
+                        FaultCode.NOT_ALLOWED,
+                        name + " is " + quoted(text) + "; allowed are " + String.join(", ", allowed) + ".")
+                .allowing(allowed)
+                .near(Names.nearest(text, allowed));
+    }
+
+    static Fault outOfBounds(Shape.Entry entry, String text, boolean below) {
+        Input input = entry.input();
+        Spelling spelling = entry.spelling();
+        String canonical = range(input, input.spellings().get(0));
+        String detail = spelling.name() + " is " + spelling.unit().with(text) + "; it must be " + range(input, spelling)
+                + (spelling.name().equals(input.name()) ? "." : " (" + input.name() + " " + canonical + ").");
+        return new Fault(spelling.name(), below ? FaultCode.BELOW_MINIMUM : FaultCode.ABOVE_MAXIMUM, detail)
+                .bounds(
+                        OptionalDouble.of(input.minimum()),
+                        OptionalDouble.of(input.maximum()),
+                        input.unit().ucum());
+    }
+
+    private static String range(Input input, Spelling spelling) {
+        return spelling.unit()
+                .with(SixDigits.text(spelling.given(input.minimum())) + " to "
+                        + SixDigits.text(spelling.given(input.maximum())));
+    }
+
+    private static String quoted(String text) {
+        return "\"" + shortened(text) + "\"";
+    }
+
+    private static String shortened(String text) {
+        return text.length() <= LONGEST_QUOTE ? text : text.substring(0, LONGEST_QUOTE) + "…";
+    }
+}

@@ -1,0 +1,96 @@
+package freshet.http.media;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+import java.nio.charset.StandardCharsets;
+
+/**
+ * Numbers as answers print them: the exact value of the double rounded half-even to 6 significant digits; plain
+ * decimals, no exponent, no trailing zeros; below 1e-12 in size 0.
+ */
+public final class SixDigits {
+
+    /** Results of this size and above are not printed. */
+    public static final double TOO_LARGE = 1e15;
+
+    private static final double TOO_SMALL = 1e-12;
+    private static final MathContext ROUNDING = new MathContext(6, RoundingMode.HALF_EVEN);
+    private static final double TIE_MARGIN = 1e-8;
+    private static final double[] POWERS = new double[23];
+
+    static {
+        for (int i = 0; i < POWERS.length; i++) {
+            POWERS[i] = Double.parseDouble("1e" + i);
+        }
+    }
+
+    private SixDigits() {}
+
+    /** {@code value} as text. */
+    public static String text(double value) {
+        Bytes bytes = new Bytes(24);
+        write(value, bytes);
+        return new String(bytes.array(), 0, bytes.length(), StandardCharsets.US_ASCII);
+    }
+
+    /** The number that the text of {@code value} denotes. */
+    public static double rounded(double value) {
+        return Double.parseDouble(text(value));
+    }
+
+    /** Appends {@code value}, which must be smaller than 1e15 in size. */
+    static void write(double value, Bytes out) {
+        double size = Math.abs(value);
+        if (size < TOO_SMALL) {
+            out.put('0');
+            return;
+        }
+        if (value < 0) {
+            out.put('-');
+        }
+        int exponent = exponent(size);
+        double scaled = scaled(size, exponent);
+        long digits = (long) scaled;
+        double rest = scaled - digits;
+        if (Math.abs(rest - 0.5) < TIE_MARGIN) {
+            // Scaling is off by at most half a unit in the last place: near a tie only the exact value decides.
+            digits = new BigDecimal(size)
+                    .round(ROUNDING)
+                    .movePointRight(5 - exponent)
+                    .longValueExact();
+        } else if (rest > 0.5) {
+            digits++;
+        }
+        print(digits, exponent, out);
+    }
+
+    /** Largest e with 10^e not above {@code size}, up to the rounding of a double. */
+    private static int exponent(double size) {
+        int e = (int) Math.floor(Math.getExponent(size) * 0.30102999566398120);
+        return scaled(size, e) >= 1e6 ? e + 1 : e;
+    }
+
+    private static double scaled(double size, int exponent) {
+        int power = 5 - exponent;
+        return power >= 0 ? size * POWERS[power] : size / POWERS[-power];
+    }
+
+    /** Prints digits x 10^(exponent - 5), digits having six places or being 1000000. */
+    private static void print(long digits, int exponent, Bytes out) {
+        int places = 5 - exponent;
+        long left = digits;
+        while (places > 0 && left % 10 == 0) {
+            left /= 10;
+            places--;
+        }
+        if (places <= 0) {
+            out.putLong(left * (long) POWERS[-places]);
+            return;
+        }
+        long unit = places < 19 ? (long) POWERS[places] : Long.MAX_VALUE;
+        out.putLong(left / unit);
+        out.put('.');
+        out.putPadded(left % unit, places);
+    }
+}

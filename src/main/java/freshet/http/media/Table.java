@@ -1,0 +1,32 @@
+package freshet.http.media;
+
+import java.lang.reflect.RecordComponent;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+
+/** What a response record declares, read once: its outputs in the order in which answers hold them. */
+public final class Table {
+
+    private final List<Column> columns = new ArrayList<>();
+
+    private Table(Class<? extends Record> type) {
+        for (RecordComponent component : type.getRecordComponents()) {
+            columns.add(Column.of(component));
+        }
+    }
+
+    /**
+     * Reads a response record.
+     *
+     * @throws IllegalStateException if an output says nothing of itself or is of an unknown kind
+     */
+    public static Table of(Class<? extends Record> type) {
+        return new Table(type);
+    }
+
+    /** The outputs. */
+    public List<Column> columns() {
+        return Collections.unmodifiableList(columns);
+    }
+}

@@ -1,0 +1,43 @@
+package freshet.http.problem;
+
+import freshet.answer.Fault;
+import freshet.answer.FaultCode;
+import java.util.List;
+import java.util.stream.Collectors;
+
+/**
+ * Why a request was not answered, as RFC 9457 tells it.
+ *
+ * @param type the kind
+ * @param status HTTP status
+ * @param detail one sentence on this request
+ * @param faults every fault of the inputs; empty if the inputs are not at fault
+ * @param inBody whether the faulty inputs stand in a JSON body
+ */
+public record Problem(ProblemType type, int status, String detail, List<Fault> faults, boolean inBody) {
+
+    /** A problem that its sentence describes fully. */
+    public static Problem of(ProblemType type, String detail) {
+        return of(type, type.status(), detail);
+    }
+
+    /** A problem with a status other than the usual one of its kind. */
+    public static Problem of(ProblemType type, int status, String detail) {
+        return new Problem(type, status, detail, List.of(), false);
+    }
+
+    /** Inputs that could not be read, or were read and refused. */
+    public static Problem of(List<Fault> faults, boolean inBody) {
+        boolean unreadable = faults.stream().map(Fault::code).anyMatch(FaultCode::unreadable);
+        ProblemType type = unreadable ? ProblemType.UNREADABLE : ProblemType.INVALID;
+        String detail = faults.size() == 1
+                ? faults.get(0).detail()
+                : faults.size() + " faults: "
+                        + faults.stream()
+                                .map(fault -> fault.field() + " " + fault.code().code())
+                                .limit(20)
+                                .collect(Collectors.joining(", "))
+                        + ".";
+        return new Problem(type, type.status(), detail, faults, inBody);
+    }
+}

@@ -1,0 +1,34 @@
+package freshet.quantity;
+
+import freshet.substance.MolarMass;
+import jakarta.validation.Constraint;
+import jakarta.validation.Payload;
+import jakarta.validation.constraints.DecimalMax;
+import jakarta.validation.constraints.DecimalMin;
+import java.lang.annotation.ElementType;
+import java.lang.annotation.Retention;
+import java.lang.annotation.RetentionPolicy;
+import java.lang.annotation.Target;
+
+/** Nitrate as N: 0 to 50000 mg/L as N. */
+@Quantity(unit = Unit.MG_PER_L, wording = "Nitrate as N", example = "40")
+@Alternative(replacing = "no3_n", by = "no3", unit = Unit.MG_PER_L, factor = MolarMass.NITROGEN / MolarMass.NITRATE)
+@DecimalMin("0")
+@DecimalMax("50000")
+@Constraint(validatedBy = {})
+@Target({ElementType.FIELD, ElementType.RECORD_COMPONENT})
+@Retention(RetentionPolicy.RUNTIME)
+public @interface Nitrate {
+
+    /** What this input is, where the wording of the quantity does not say enough. */
+    String value() default "";
+
+    /** Not used: faults are worded from the quantity. */
+    String message() default "";
+
+    /** Jakarta Validation groups; none. */
+    Class<?>[] groups() default {};
+
+    /** Jakarta Validation payload; none. */
+    Class<? extends Payload>[] payload() default {};
+}

@@ -1,0 +1,33 @@
+package freshet.substance;
+
+/**
+ * Molar masses in g/mol, from the abridged standard atomic weights (IUPAC-CIAAW 2021; Prohaska et al. 2022, Pure Appl.
+ * Chem. 94:573-600): H 1.008, C 12.011, N 14.007, O 15.999, Na 22.990, Ca 40.078. The mass of electrons is neglected.
+ */
+public final class MolarMass {
+
+    /** Nitrogen, N. */
+    public static final double NITROGEN = 14.007;
+    /** Ammonia, NH3. */
+    public static final double AMMONIA = 17.031;
+    /** Ammonium ion, NH4+. */
+    public static final double AMMONIUM = 18.039;
+    /** Nitrite ion, NO2-. */
+    public static final double NITRITE = 46.005;
+    /** Nitrous acid, HNO2. */
+    public static final double NITROUS_ACID = 47.013;
+    /** Nitrate ion, NO3-. */
+    public static final double NITRATE = 62.004;
+    /** Oxygen, O2. */
+    public static final double OXYGEN = 31.998;
+    /** Carbon dioxide, CO2. */
+    public static final double CARBON_DIOXIDE = 44.009;
+    /** Calcium carbonate per equivalent of alkalinity, CaCO3/2; g per equivalent. */
+    public static final double CALCIUM_CARBONATE_EQUIVALENT = 50.043;
+    /** Sodium bicarbonate, NaHCO3. */
+    public static final double SODIUM_BICARBONATE = 84.006;
+    /** Cells of nitrifiers as C5H7O2N. */
+    public static final double CELLS = 113.116;
+
+    private MolarMass() {}
+}

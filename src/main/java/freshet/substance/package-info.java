@@ -1,0 +1,5 @@
+/** Molar masses and conversions between the bases in which a concentration is quoted. */
+@NullMarked
+package freshet.substance;
+
+import org.jspecify.annotations.NullMarked;
