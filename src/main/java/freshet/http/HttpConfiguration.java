@@ -3,7 +3,6 @@ package freshet.http;
 import freshet.http.limits.Admission;
 import io.micrometer.core.instrument.MeterRegistry;
 import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Map;
 import org.springframework.beans.factory.annotation.Value;
 import org.springframework.boot.info.BuildProperties;
@@ -17,13 +16,15 @@ class HttpConfiguration {
 
     @Bean
     ServletRegistrationBean<CalculationServlet> calculationServlet(
-            List<Calculation<?, ?>> calculations,
+            Calculations calculations,
             MeterRegistry registry,
             BuildProperties build,
             @Value("${freshet.limits.calculations-at-once}") int atOnce) {
         Map<String, Endpoint<?, ?>> endpoints = new LinkedHashMap<>();
-        calculations.forEach(calculation ->
-                endpoints.put(calculation.address(), new Endpoint<>(calculation, String.valueOf(build.getVersion()))));
+        calculations
+                .all()
+                .forEach(calculation -> endpoints.put(
+                        calculation.address(), new Endpoint<>(calculation, String.valueOf(build.getVersion()))));
         CalculationServlet servlet =
                 new CalculationServlet(endpoints, new Admission(atOnce), new RequestTimers(registry));
         ServletRegistrationBean<CalculationServlet> registration =

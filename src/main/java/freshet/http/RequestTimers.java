@@ -42,6 +42,8 @@ final class RequestTimers {
                 .tag("method", key.method())
                 .tag("status", Integer.toString(key.status()))
                 .tag("outcome", outcome(key.status()))
+                .tag("error", "none")
+                .tag("exception", "none")
                 .register(registry);
     }
 

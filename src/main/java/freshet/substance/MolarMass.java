@@ -1,5 +1,8 @@
 package freshet.substance;
 
+import freshet.method.Constant;
+import java.util.List;
+
 /**
  * Molar masses in g/mol, from the abridged standard atomic weights (IUPAC-CIAAW 2021; Prohaska et al. 2022, Pure Appl.
  * Chem. 94:573-600): H 1.008, C 12.011, N 14.007, O 15.999, Na 22.990, Ca 40.078. The mass of electrons is neglected.
@@ -28,6 +31,25 @@ public final class MolarMass {
     public static final double SODIUM_BICARBONATE = 84.006;
     /** Cells of nitrifiers as C5H7O2N. */
     public static final double CELLS = 113.116;
+
+    /** Where they come from. */
+    public static final String CITATION =
+            "Abridged standard atomic weights, IUPAC-CIAAW 2021; Prohaska et al. 2022, Pure"
+                    + " Appl. Chem. 94:573-600 (values from memory)";
+
+    /** All of them. */
+    public static final List<Constant> ALL = List.of(
+            new Constant("N", NITROGEN, "g/mol", "nitrogen"),
+            new Constant("NH3", AMMONIA, "g/mol", "ammonia"),
+            new Constant("NH4", AMMONIUM, "g/mol", "ammonium ion"),
+            new Constant("NO2", NITRITE, "g/mol", "nitrite ion"),
+            new Constant("HNO2", NITROUS_ACID, "g/mol", "nitrous acid"),
+            new Constant("NO3", NITRATE, "g/mol", "nitrate ion"),
+            new Constant("O2", OXYGEN, "g/mol", "oxygen"),
+            new Constant("CO2", CARBON_DIOXIDE, "g/mol", "carbon dioxide"),
+            new Constant("CaCO3/2", CALCIUM_CARBONATE_EQUIVALENT, "g/eq", "calcium carbonate per equivalent"),
+            new Constant("NaHCO3", SODIUM_BICARBONATE, "g/mol", "sodium bicarbonate"),
+            new Constant("C5H7O2N", CELLS, "g/mol", "cells of nitrifiers"));
 
     private MolarMass() {}
 }

@@ -2,11 +2,13 @@ package freshet.ammonia.web;
 
 import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.AmmoniaSpeciation;
+import freshet.ammonia.Nh3Guideline;
 import freshet.answer.Answer;
 import freshet.http.Calculation;
 import freshet.method.Method;
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.Stream;
 import org.springframework.context.annotation.Bean;
 import org.springframework.context.annotation.Configuration;
 
@@ -30,6 +32,22 @@ class AmmoniaCalculations {
                         "An error of 0.1 in pH is an error of about 25 % in NH3: calibrate the probe.")
                 .using(DISSOCIATION_METHODS)
                 .shownBy("tan_mg_per_l=1.2&ph=8.1&temperature_c=26");
+    }
+
+    @Bean
+    Calculation<AmmoniaLimitsRequest, AmmoniaLimitsResponse> ammoniaLimits() {
+        return Calculation.of(
+                        "ammonia/limits", AmmoniaLimitsRequest.class, AmmoniaLimitsResponse.class, LimitsAnswer::to)
+                .describedAs(
+                        "At which total ammonia a limit of un-ionized ammonia is met, and how far pH and temperature may"
+                                + " move before it is",
+                        "A limit of total ammonia holds for one pH and one temperature; ask again when either moves."
+                                + " Guidelines are for receiving waters: not advice for a culture tank, not a permit.")
+                .using(Stream.concat(
+                                DISSOCIATION_METHODS.stream(),
+                                Arrays.stream(Nh3Guideline.values()).map(Nh3Guideline::method))
+                        .toList())
+                .shownBy("nh3_n_limit_mg_per_l=0.02&ph=7.4&temperature_c=26&tan_mg_per_l=1.2");
     }
 
     private static Answer<AmmoniaSpeciationResponse> speciation(AmmoniaSpeciationRequest request) {

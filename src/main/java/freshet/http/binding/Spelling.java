@@ -13,12 +13,12 @@ import freshet.quantity.Unit;
 public record Spelling(String name, Unit unit, double factor, double offset) {
 
     /** The canonical value of {@code given}. */
-    double canonical(double given) {
+    public double canonical(double given) {
         return (given + offset) * factor;
     }
 
     /** {@code canonical} as it is written under this name. */
-    double given(double canonical) {
+    public double given(double canonical) {
         return canonical / factor - offset;
     }
 }

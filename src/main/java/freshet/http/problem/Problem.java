@@ -16,6 +16,11 @@ import java.util.stream.Collectors;
  */
 public record Problem(ProblemType type, int status, String detail, List<Fault> faults, boolean inBody) {
 
+    private static final String UNREADABLE_BY_SERVER =
+            "The request line, a header field or the framing of the body could"
+                    + " not be read; percent-encode every character of the address that is not a letter, a digit or one of"
+                    + " - . _ ~ / ? & =.";
+
     /** A problem that its sentence describes fully. */
     public static Problem of(ProblemType type, String detail) {
         return of(type, type.status(), detail);
@@ -24,6 +29,17 @@ public record Problem(ProblemType type, int status, String detail, List<Fault> f
     /** A problem with a status other than the usual one of its kind. */
     public static Problem of(ProblemType type, int status, String detail) {
         return new Problem(type, status, detail, List.of(), false);
+    }
+
+    /** What Spring or the server refused with an HTTP status and no more words. */
+    public static Problem ofStatus(int status) {
+        ProblemType type = ProblemType.ofStatus(status);
+        return switch (type) {
+            // The server says 501 or 505 to an unknown transfer coding or protocol, which is a fault of the request.
+            case UNREADABLE -> of(type, UNREADABLE_BY_SERVER);
+            case INTERNAL -> of(type, type.explanation());
+            default -> of(type, status, type.explanation());
+        };
     }
 
     /** Inputs that could not be read, or were read and refused. */

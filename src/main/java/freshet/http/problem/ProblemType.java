@@ -34,7 +34,7 @@ public enum ProblemType {
     TOO_LARGE(
             413,
             "The request is too large",
-            "A body may hold 64 KiB (otherwise 413), the path with its query 8 KiB (414), the header fields 16 KiB"
+            "A body may hold 64 KiB (otherwise 413), the path with its query 8 KiB (414), the header fields 24 KiB"
                     + " (431)."),
     /** The media type of the body is not one that can be read. */
     UNSUPPORTED_MEDIA(
@@ -88,7 +88,8 @@ public enum ProblemType {
             case 415 -> UNSUPPORTED_MEDIA;
             case 422 -> INVALID;
             case 503 -> BUSY;
-            default -> status >= 500 ? INTERNAL : UNREADABLE;
+            case 500 -> INTERNAL;
+            default -> UNREADABLE;
         };
     }
 }

@@ -3,12 +3,17 @@ package freshet.http.problem;
 import freshet.answer.Refusal;
 import freshet.http.binding.Controls;
 import freshet.http.binding.UnreadableBody;
+import jakarta.servlet.RequestDispatcher;
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.io.IOException;
 import java.util.HexFormat;
+import java.util.Objects;
+import java.util.Optional;
 import java.util.concurrent.ThreadLocalRandom;
+import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.jspecify.annotations.Nullable;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 
@@ -20,7 +25,9 @@ public final class Problems {
 
     private static final Logger LOG = LoggerFactory.getLogger(Problems.class);
     private static final String REQUEST_ID_ATTRIBUTE = Problems.class.getName() + ".requestId";
-    private static final Pattern REQUEST_ID = Pattern.compile("[A-Za-z0-9._-]{1,64}");
+    private static final Pattern REQUEST_ID = Pattern.compile("([A-Za-z0-9._-]{1,64})");
+    /** W3C Trace Context: the trace id finds the request in the caller's own traces. */
+    private static final Pattern TRACE_PARENT = Pattern.compile("[0-9a-f]{2}-([0-9a-f]{32})-[0-9a-f]{16}-[0-9a-f]{2}");
 
     private Problems() {}
 
@@ -71,15 +78,26 @@ public final class Problems {
         }
     }
 
+    /** The path the caller asked for, also where the server has since turned to its error page. */
+    private static String path(HttpServletRequest request) {
+        Object asked = request.getAttribute(RequestDispatcher.ERROR_REQUEST_URI);
+        return asked != null ? asked.toString() : Objects.requireNonNullElse(request.getRequestURI(), "/");
+    }
+
     private static String requestId(HttpServletRequest request) {
         if (request.getAttribute(REQUEST_ID_ATTRIBUTE) instanceof String known) {
             return known;
         }
-        String given = request.getHeader("X-Request-Id");
-        String id = given != null && REQUEST_ID.matcher(given).matches()
-                ? given
-                : HexFormat.of().toHexDigits(ThreadLocalRandom.current().nextLong());
+        String id = matched(REQUEST_ID, request.getHeader("X-Request-Id"))
+                .or(() -> matched(TRACE_PARENT, request.getHeader("traceparent")))
+                .orElseGet(() ->
+                        HexFormat.of().toHexDigits(ThreadLocalRandom.current().nextLong()));
         request.setAttribute(REQUEST_ID_ATTRIBUTE, id);
         return id;
+    }
+
+    private static Optional<String> matched(Pattern pattern, @Nullable String header) {
+        Matcher matcher = pattern.matcher(String.valueOf(header));
+        return header != null && matcher.matches() ? Optional.of(matcher.group(1)) : Optional.empty();
     }
 }

@@ -1,0 +1,22 @@
+package freshet.http;
+
+import freshet.http.problem.ProblemValve;
+import org.apache.catalina.core.StandardHost;
+import org.springframework.boot.tomcat.servlet.TomcatServletWebServerFactory;
+import org.springframework.boot.web.server.WebServerFactoryCustomizer;
+import org.springframework.context.annotation.Bean;
+import org.springframework.context.annotation.Configuration;
+
+/** The server's own answers follow the service's rules. */
+@Configuration(proxyBeanMethods = false)
+class ServerConfiguration {
+
+    @Bean
+    WebServerFactoryCustomizer<TomcatServletWebServerFactory> problemsFromTheServer() {
+        return factory -> factory.addContextCustomizers(context -> {
+            if (context.getParent() instanceof StandardHost host) {
+                host.setErrorReportValveClass(ProblemValve.class.getName());
+            }
+        });
+    }
+}
