@@ -20,7 +20,10 @@ public final class Negotiation {
      * @throws ProblemException 406
      */
     public static void checkAccept(@Nullable String accept) {
-        if (accept == null || accept.equals("*/*") || accept.equals(MediaType.APPLICATION_JSON_VALUE)) {
+        if (accept == null
+                || accept.isBlank()
+                || accept.equals("*/*")
+                || accept.equals(MediaType.APPLICATION_JSON_VALUE)) {
             return;
         }
         try {
