@@ -4,7 +4,10 @@ import freshet.acidity.Dickson1990;
 import freshet.acidity.DicksonRiley1979;
 import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.Nh3Guideline;
+import freshet.dilution.DilutionMode;
 import freshet.method.Method;
+import freshet.nitrate.MixedTank;
+import freshet.nitrate.NitrateFromFeed;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
@@ -18,7 +21,9 @@ final class Methods {
                     Arrays.stream(AmmoniaMethod.values())
                             .map(choice -> choice.dissociation().method()),
                     Arrays.stream(Nh3Guideline.values()).map(Nh3Guideline::method),
-                    Stream.of(Dickson1990.METHOD, DicksonRiley1979.METHOD))
+                    Stream.of(Dickson1990.METHOD, DicksonRiley1979.METHOD),
+                    Stream.of(MixedTank.METHOD, NitrateFromFeed.METHOD),
+                    Arrays.stream(DilutionMode.values()).map(DilutionMode::method))
             .flatMap(methods -> methods)
             .sorted(Comparator.comparing(Method::id))
             .toList();

@@ -38,6 +38,11 @@ final class InputReader {
             note(annotation);
         }
         AnnotatedType type = component.getAnnotatedType();
+        for (Annotation annotation : type.getAnnotations()) {
+            if (!(annotation instanceof NotNull) && !(annotation instanceof Nullable)) {
+                throw unread(annotation);
+            }
+        }
         required = type.isAnnotationPresent(NotNull.class);
         if (!required && defaultText.isEmpty() && !type.isAnnotationPresent(Nullable.class)) {
             throw new IllegalStateException("Input " + name + " is neither required nor optional nor has a default");
@@ -59,8 +64,12 @@ final class InputReader {
         } else if (annotation.annotationType().isAnnotationPresent(Quantity.class)) {
             quantity = annotation;
         } else {
-            throw new IllegalStateException("Input " + name + " bears an annotation that no one reads: " + annotation);
+            throw unread(annotation);
         }
+    }
+
+    private IllegalStateException unread(Annotation annotation) {
+        return new IllegalStateException("Input " + name + " bears an annotation that no one reads: " + annotation);
     }
 
     private Input number(Class<? extends Annotation> type) {

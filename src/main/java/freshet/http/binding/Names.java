@@ -30,14 +30,14 @@ public final class Names {
         return value.name().toLowerCase(Locale.ROOT).replace('_', '-');
     }
 
-    /** The known name that takes the fewest edits from {@code given}, if that is at most a third of its letters. */
+    /** The known name that takes the fewest edits from {@code given}, if that is at most half of its letters. */
     public static Optional<String> nearest(String given, Collection<String> known) {
         if (given.length() > 100) {
             return Optional.empty();
         }
         String folded = given.toLowerCase(Locale.ROOT).replace('-', '_').replace(' ', '_');
         return known.stream()
-                .filter(name -> distance(folded, name) <= Math.max(1, given.length() / 3))
+                .filter(name -> distance(folded, name) <= Math.max(1, given.length() / 2))
                 .min(Comparator.comparingInt(name -> distance(folded, name)));
     }
 

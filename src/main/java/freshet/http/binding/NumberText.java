@@ -10,7 +10,7 @@ final class NumberText {
 
     private static final int LONGEST = 32;
     private static final Pattern MEANT = Pattern.compile(
-            "[\\s\"']*([+-]?)0*(?=[0-9.,])([0-9]*)(?:[.,]([0-9]*))?(?:[eE]([+-]?[0-9]{1,3}))?[fFdD]?[\\s\"']*");
+            "[\\s\"']*([+-]?)0*(?=[.,]?[0-9])([0-9]*)(?:[.,]([0-9]*))?(?:[eE]([+-]?[0-9]{1,3}))?[fFdD]?[\\s\"']*");
 
     private NumberText() {}
 
