@@ -4,6 +4,10 @@ import freshet.method.Citation;
 import freshet.method.Constant;
 import freshet.method.Method;
 import freshet.method.Seen;
+import freshet.nitrification.Meals;
+import freshet.nitrification.ProteinCoefficient;
+import freshet.nitrification.Ration;
+import freshet.nitrification.TanLoad;
 
 /**
  * Nitrate nitrogen made from feed: total ammonia by the protein coefficient, less what nitrifiers build into cells.
@@ -24,17 +28,19 @@ public final class NitrateFromFeed {
                             "10.1016/j.aquaculture.2006.03.019"),
                     Seen.SECONDARY)
             .equation(
-                    "nitrate N = 1000 feed protein/100 c y, g/day; feed in kg/day as fed, protein in percent",
-                    new Constant("c", 0.092, "g/g", "total ammonia nitrogen per protein fed"),
+                    "nitrate N = y TAN, g/day; TAN from the protein fed",
                     new Constant("y", 0.976, "g/g", "nitrate nitrogen per ammonia nitrogen oxidised; from memory"))
-            .accuracy("accepted rules spread from 0.070 to 0.112 for c");
+            .accuracy("as that of the ammonia from feed: accepted rules lie 22 % below to 12 % above")
+            .uses(ProteinCoefficient.METHOD);
 
-    private static final double[] CONSTANTS = METHOD.values();
+    private static final double NITRATE_PER_AMMONIA = METHOD.values()[0];
 
     private NitrateFromFeed() {}
 
     /** Nitrate nitrogen, g/day, from feed (kg/day) with protein (percent, as fed). */
     public static double gPerDay(double feedKgPerDay, double proteinPercent) {
-        return 1000 * feedKgPerDay * (proteinPercent / 100) * CONSTANTS[0] * CONSTANTS[1];
+        return TanLoad.of(new Ration(feedKgPerDay, proteinPercent), Meals.SEVERAL)
+                        .tanGPerDay()
+                * NITRATE_PER_AMMONIA;
     }
 }

@@ -14,6 +14,8 @@ import java.util.Map;
 /** The operations of the catalogue. */
 final class CataloguePaths {
 
+    static final String TAG = "catalogue";
+
     private CataloguePaths() {}
 
     static void add(Map<String, PathItem> paths, Map<String, Schema<?>> schemas) {
@@ -47,7 +49,8 @@ final class CataloguePaths {
         return new Operation()
                 .operationId(id)
                 .summary(summary)
-                .addTagsItem("catalogue")
+                .addTagsItem(TAG)
+                .description(summary + "; it changes with releases only.")
                 .responses(new ApiResponses()
                         .addApiResponse("200", ok)
                         .addApiResponse("400", new ApiResponse().$ref("#/components/responses/Problem400"))

@@ -14,6 +14,7 @@ import io.swagger.v3.oas.models.tags.Tag;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
+import java.util.stream.Stream;
 import org.springdoc.core.customizers.GlobalOpenApiCustomizer;
 import org.springframework.boot.info.BuildProperties;
 import org.springframework.context.annotation.Bean;
@@ -50,6 +51,7 @@ class OpenApiConfiguration {
                             .description(DESCRIPTION)
                             .license(new License().name("Apache-2.0").identifier("Apache-2.0")))
                     .servers(List.of(new Server().url("/")))
+                    .security(List.of())
                     .tags(tags(calculations));
             Map<String, PathItem> paths = new TreeMap<>();
             Map<String, Schema<?>> schemas = new TreeMap<>();
@@ -73,11 +75,12 @@ class OpenApiConfiguration {
     }
 
     private static List<Tag> tags(Calculations calculations) {
-        return calculations.all().stream()
+        Stream<Tag> topics = calculations.all().stream()
                 .map(OpenApiConfiguration::topic)
                 .distinct()
-                .map(topic -> new Tag().name(topic))
-                .toList();
+                .map(topic -> new Tag().name(topic).description("Calculations on " + topic));
+        Tag catalogue = new Tag().name(CataloguePaths.TAG).description("What the service tells of itself");
+        return Stream.concat(topics, Stream.of(catalogue)).toList();
     }
 
     static String topic(Calculation<?, ?> calculation) {

@@ -1,10 +1,7 @@
 package freshet.http.binding;
 
 import freshet.answer.Fault;
-import freshet.answer.FaultCode;
-import freshet.http.binding.Input.Kind;
 import java.util.List;
-import java.util.Locale;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 
@@ -46,17 +43,8 @@ final class Draft<T extends Record> {
 
     /** Takes a value as text, the way a query string or a table holds it. */
     void text(Shape.Entry entry, String text) {
-        if (!claim(entry)) {
-            return;
-        }
-        if (text.isEmpty()) {
-            faults.add(Wording.missing(entry.input(), entry.spelling().name()));
-        } else if (entry.input().numeric()) {
-            number(entry, text);
-        } else if (entry.input().kind() == Kind.FLAG) {
-            flag(entry, text);
-        } else {
-            choice(entry, text);
+        if (claim(entry)) {
+            values[entry.input().index()] = ValueReader.read(entry, text, faults);
         }
     }
 
@@ -70,14 +58,7 @@ final class Draft<T extends Record> {
     /** Takes a value that is of another kind than the input, for example an object. */
     void misfit(Shape.Entry entry, String text) {
         if (claim(entry)) {
-            faults.add(
-                    switch (entry.input().kind()) {
-                        case NUMBER, WHOLE -> Wording.notNumber(entry.spelling().name(), text);
-                        case FLAG -> Wording.notBoolean(entry.spelling().name(), text);
-                        case CHOICE ->
-                            Wording.notAllowed(
-                                    entry.spelling().name(), text, entry.input().allowed());
-                    });
+            faults.add(Wording.unreadable(entry, text));
         }
     }
 
@@ -122,61 +103,7 @@ final class Draft<T extends Record> {
             givenBy[entry.input().index()] = name;
             return true;
         }
-        faults.add(
-                earlier.equals(name)
-                        ? Wording.repeated(name)
-                        : new Fault(
-                                name,
-                                FaultCode.CONFLICT,
-                                "Give only one of " + entry.input().anyName() + ", even if they agree."));
+        faults.add(earlier.equals(name) ? Wording.repeated(name) : Wording.givenTwice(entry));
         return false;
-    }
-
-    private void number(Shape.Entry entry, String text) {
-        Input input = entry.input();
-        if (!NumberText.isNumber(text)) {
-            faults.add(Wording.notNumber(entry.spelling().name(), text));
-            return;
-        }
-        double given = Double.parseDouble(text);
-        double value = entry.spelling().canonical(given);
-        if (value < input.minimum() || value > input.maximum()) {
-            faults.add(Wording.outOfBounds(entry, text, value < input.minimum()));
-        } else if (input.kind() == Kind.WHOLE) {
-            whole(entry, text, value);
-        } else {
-            values[input.index()] = value;
-        }
-    }
-
-    private void whole(Shape.Entry entry, String text, double value) {
-        if (value == Math.rint(value)) {
-            values[entry.input().index()] = (int) value;
-        } else {
-            faults.add(new Fault(
-                    entry.spelling().name(),
-                    FaultCode.NOT_ALLOWED,
-                    entry.spelling().name() + " is " + text + "; it must be a whole number."));
-        }
-    }
-
-    private void flag(Shape.Entry entry, String text) {
-        if (text.equals("true") || text.equals("false")) {
-            values[entry.input().index()] = text.equals("true");
-        } else {
-            faults.add(Wording.notBoolean(entry.spelling().name(), text));
-        }
-    }
-
-    private void choice(Shape.Entry entry, String text) {
-        Object value = entry.input().choices().get(text);
-        if (value == null) {
-            faults.add(Wording.notAllowed(
-                    entry.spelling().name(),
-                    text.toLowerCase(Locale.ROOT),
-                    entry.input().allowed()));
-        } else {
-            values[entry.input().index()] = value;
-        }
     }
 }

@@ -42,7 +42,31 @@ final class Wording {
         return new Fault(name, FaultCode.UNKNOWN, name + " is a control: it stands in the query, not in the body.");
     }
 
-    static Fault notNumber(String name, String text) {
+    /** A value that is not of the kind its input takes. */
+    static Fault unreadable(Shape.Entry entry, String text) {
+        String name = entry.spelling().name();
+        return switch (entry.input().kind()) {
+            case NUMBER, WHOLE -> notNumber(name, text);
+            case FLAG ->
+                new Fault(name, FaultCode.NOT_BOOLEAN, name + " is " + quoted(text) + "; write true or false.")
+                        .allowing(List.of("true", "false"));
+            case CHOICE -> notAllowed(name, text, entry.input().allowed());
+        };
+    }
+
+    static Fault notWhole(Shape.Entry entry, String text) {
+        String name = entry.spelling().name();
+        return new Fault(name, FaultCode.NOT_ALLOWED, name + " is " + text + "; it must be a whole number.");
+    }
+
+    static Fault givenTwice(Shape.Entry entry) {
+        return new Fault(
+                entry.spelling().name(),
+                FaultCode.CONFLICT,
+                "Give only one of " + entry.input().anyName() + ", even if they agree.");
+    }
+
+    private static Fault notNumber(String name, String text) {
         return new Fault(
                 name,
                 FaultCode.NOT_A_NUMBER,
@@ -52,12 +76,7 @@ final class Wording {
                                 .orElse("."));
     }
 
-    static Fault notBoolean(String name, String text) {
-        return new Fault(name, FaultCode.NOT_BOOLEAN, name + " is " + quoted(text) + "; write true or false.")
-                .allowing(List.of("true", "false"));
-    }
-
-    static Fault notAllowed(String name, String text, List<String> allowed) {
+    private static Fault notAllowed(String name, String text, List<String> allowed) {
         return new Fault(
                         name,
                         FaultCode.NOT_ALLOWED,
