@@ -8,22 +8,59 @@ import freshet.dilution.DilutionMode;
 import freshet.method.Method;
 import freshet.nitrate.MixedTank;
 import freshet.nitrate.NitrateFromFeed;
+import freshet.nitrification.AlkalinityFactor;
+import freshet.nitrification.BiofilterCapacity;
+import freshet.nitrification.BiofilterSizing;
+import freshet.nitrification.CarbonFactor;
+import freshet.nitrification.FilterFlow;
+import freshet.nitrification.HalfOrder;
+import freshet.nitrification.LoadMethod;
+import freshet.nitrification.Meals;
+import freshet.nitrification.MeasuredRate;
+import freshet.nitrification.Media;
+import freshet.nitrification.OxygenLimit;
+import freshet.nitrification.PhFactor;
+import freshet.nitrification.Ration;
+import freshet.nitrification.SalinityFactor;
+import freshet.nitrification.Stoichiometry;
+import freshet.nitrification.SubstrateFloor;
+import freshet.nitrification.TemperatureCredit;
+import freshet.nitrification.TemperatureMethod;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 import java.util.stream.Stream;
 
 /** All methods, by id. */
 final class Methods {
 
     private static final List<Method> ALL = Stream.of(
-                    Arrays.stream(AmmoniaMethod.values())
-                            .map(choice -> choice.dissociation().method()),
-                    Arrays.stream(Nh3Guideline.values()).map(Nh3Guideline::method),
                     Stream.of(Dickson1990.METHOD, DicksonRiley1979.METHOD),
+                    of(AmmoniaMethod.values(), choice -> choice.dissociation().method()),
+                    of(Nh3Guideline.values(), Nh3Guideline::method),
+                    of(LoadMethod.values(), LoadMethod::method),
+                    of(Stoichiometry.values(), Stoichiometry::method),
+                    of(TemperatureMethod.values(), TemperatureMethod::method),
+                    Stream.of(
+                            Ration.METHOD,
+                            Meals.METHOD,
+                            BiofilterCapacity.METHOD,
+                            BiofilterSizing.METHOD,
+                            Media.METHOD,
+                            MeasuredRate.METHOD,
+                            HalfOrder.METHOD,
+                            OxygenLimit.METHOD,
+                            TemperatureCredit.METHOD,
+                            PhFactor.METHOD,
+                            AlkalinityFactor.METHOD,
+                            SalinityFactor.METHOD,
+                            CarbonFactor.METHOD,
+                            FilterFlow.METHOD,
+                            SubstrateFloor.METHOD),
                     Stream.of(MixedTank.METHOD, NitrateFromFeed.METHOD),
-                    Arrays.stream(DilutionMode.values()).map(DilutionMode::method))
+                    of(DilutionMode.values(), DilutionMode::method))
             .flatMap(methods -> methods)
             .sorted(Comparator.comparing(Method::id))
             .toList();
@@ -36,5 +73,9 @@ final class Methods {
 
     static Optional<Method> withId(String id) {
         return ALL.stream().filter(method -> method.id().equals(id)).findFirst();
+    }
+
+    private static <C> Stream<Method> of(C[] choices, Function<C, Method> method) {
+        return Arrays.stream(choices).map(method);
     }
 }

@@ -15,6 +15,9 @@ public @interface ExactlyOneOf {
     /** Names of the inputs. */
     String[] value();
 
+    /** The one of them, if any, that may also stand beside another; the calculation judges where that makes sense. */
+    String beside() default "";
+
     /** Several groups of one request. */
     @Target(ElementType.TYPE)
     @Retention(RetentionPolicy.RUNTIME)

@@ -124,7 +124,7 @@ class CatalogueHttpTest {
         List<String> lines = landing.asString().lines().toList();
         assertThat(lines)
                 .hasSizeLessThanOrEqualTo(40)
-                .allSatisfy(line -> assertThat(line.length()).isLessThan(240));
+                .allSatisfy(line -> assertThat(line.length()).isLessThan(300));
         List<String> curls =
                 lines.stream().filter(line -> line.startsWith("curl '")).toList();
         assertThat(curls).hasSameSizeAs(calculations.all());

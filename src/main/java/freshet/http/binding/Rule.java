@@ -11,8 +11,13 @@ import java.util.function.Predicate;
  *
  * @param kind what it demands
  * @param names canonical names of the inputs; of {@link Kind#TOGETHER} the one with the need and the one needed
+ * @param beside the input that is no rival to the others, of which there must be one all the same; empty if none is
  */
-public record Rule(Kind kind, List<String> names) {
+public record Rule(Kind kind, List<String> names, String beside) {
+
+    Rule(Kind kind, List<String> names) {
+        this(kind, names, "");
+    }
 
     /** The kinds of rules. */
     public enum Kind {
@@ -34,7 +39,7 @@ public record Rule(Kind kind, List<String> names) {
                             names.get(1) + " is missing: " + names.get(0) + " cannot be used without it."))
                     : Optional.empty();
         }
-        if (present.size() > 1) {
+        if (present.stream().filter(name -> !name.equals(beside)).count() > 1) {
             return Optional.of(new Fault(
                             present.get(1),
                             FaultCode.CONFLICT,

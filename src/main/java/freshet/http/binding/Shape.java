@@ -91,7 +91,7 @@ public final class Shape<T extends Record> {
 
     private <R extends Record> RecordMaker<R> read(Class<R> type) {
         Arrays.stream(type.getAnnotationsByType(ExactlyOneOf.class))
-                .forEach(group -> rules.add(new Rule(Rule.Kind.EXACTLY_ONE, List.of(group.value()))));
+                .forEach(group -> rules.add(new Rule(Rule.Kind.EXACTLY_ONE, List.of(group.value()), group.beside())));
         Arrays.stream(type.getAnnotationsByType(AtMostOneOf.class))
                 .forEach(group -> rules.add(new Rule(Rule.Kind.AT_MOST_ONE, List.of(group.value()))));
         Arrays.stream(type.getAnnotationsByType(Together.class))
