@@ -12,7 +12,7 @@ import freshet.substance.Temperature;
  *
  * <p>Dickson A.G. (1990) Standard potential of the reaction AgCl(s) + 1/2 H2(g) = Ag(s) + HCl(aq), and the standard
  * acidity constant of the ion HSO4- in synthetic sea water from 273.15 to 318.15 K. J. Chem. Thermodyn. 22:113-127,
- * doi:10.1016/0021-9614(90)90074-Z. Salinity 5-45, 0-45 °C. Coefficients read in public transcriptions.
+ * doi:10.1016/0021-9614(90)90074-Z. Salinity 5-45, 0-45 °C. Coefficients read in public copies.
  */
 public final class Dickson1990 {
 

@@ -12,7 +12,7 @@ import freshet.substance.Temperature;
  *
  * <p>Dickson A.G., Riley J.P. (1979) The estimation of acid dissociation constants in seawater media from
  * potentiometric titrations with strong base. I. Mar. Chem. 7:89-99, doi:10.1016/0304-4203(79)90002-1. Coefficients
- * read in public transcriptions.
+ * read in public copies.
  */
 public final class DicksonRiley1979 {
 

@@ -4,7 +4,7 @@ package freshet.acidity;
  * What sea salt brings in proportion to salinity.
  *
  * <p>Totals: sulfate after Morris and Riley 1966, fluoride after Riley 1965, both over chlorinity S/1.80655. Ionic
- * strength: DOE 1994; Dickson, Sabine and Christian 2007. Read in public transcriptions, not in the papers.
+ * strength: DOE 1994; Dickson, Sabine and Christian 2007. Read in public copies, not in the papers.
  */
 public final class SeaSalt {
 

@@ -18,7 +18,7 @@ import freshet.substance.Temperature;
  * <p>Clegg S.L., Whitfield M. (1995) A chemical model of seawater including dissolved ammonia and the stoichiometric
  * dissociation constant of ammonia in estuarine water and seawater from -2 to 40 °C. Geochim. Cosmochim. Acta
  * 59(12):2403-2421, doi:10.1016/0016-7037(95)00135-2. Salinity 0-40, -2 to 40 °C; K better than 5 %. Erratum: one public
- * transcription misplaces a bracket so that all salinity terms are multiplied by 2729.33.
+ * copy misplaces a bracket so that all salinity terms are multiplied by 2729.33.
  */
 public final class CleggWhitfield1995 implements AmmoniaDissociation {
 
@@ -61,7 +61,7 @@ public final class CleggWhitfield1995 implements AmmoniaDissociation {
             .within(TEMPERATURE, SALINITY)
             .accuracy("K better than 5 % as stated by the source; fit of the equation ±0.00015 in pK; at salinity 0 it"
                     + " lies 0.002 below emerson-1975 (0.4 % of NH3)")
-            .errata("one public transcription misplaces a bracket so that every salinity term is multiplied by 2729.33")
+            .errata("one public copy misplaces a bracket so that every salinity term is multiplied by 2729.33")
             .uses(Dickson1990.METHOD);
 
     private static final double KELVIN_25C = 298.15;

@@ -8,24 +8,11 @@ import freshet.dilution.DilutionMode;
 import freshet.method.Method;
 import freshet.nitrate.MixedTank;
 import freshet.nitrate.NitrateFromFeed;
-import freshet.nitrification.AlkalinityFactor;
 import freshet.nitrification.BiofilterCapacity;
 import freshet.nitrification.BiofilterSizing;
-import freshet.nitrification.CarbonFactor;
-import freshet.nitrification.FilterFlow;
-import freshet.nitrification.HalfOrder;
 import freshet.nitrification.LoadMethod;
-import freshet.nitrification.Meals;
-import freshet.nitrification.MeasuredRate;
-import freshet.nitrification.Media;
-import freshet.nitrification.OxygenLimit;
-import freshet.nitrification.PhFactor;
 import freshet.nitrification.Ration;
-import freshet.nitrification.SalinityFactor;
 import freshet.nitrification.Stoichiometry;
-import freshet.nitrification.SubstrateFloor;
-import freshet.nitrification.TemperatureCredit;
-import freshet.nitrification.TemperatureMethod;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
@@ -42,26 +29,12 @@ final class Methods {
                     of(Nh3Guideline.values(), Nh3Guideline::method),
                     of(LoadMethod.values(), LoadMethod::method),
                     of(Stoichiometry.values(), Stoichiometry::method),
-                    of(TemperatureMethod.values(), TemperatureMethod::method),
-                    Stream.of(
-                            Ration.METHOD,
-                            Meals.METHOD,
-                            BiofilterCapacity.METHOD,
-                            BiofilterSizing.METHOD,
-                            Media.METHOD,
-                            MeasuredRate.METHOD,
-                            HalfOrder.METHOD,
-                            OxygenLimit.METHOD,
-                            TemperatureCredit.METHOD,
-                            PhFactor.METHOD,
-                            AlkalinityFactor.METHOD,
-                            SalinityFactor.METHOD,
-                            CarbonFactor.METHOD,
-                            FilterFlow.METHOD,
-                            SubstrateFloor.METHOD),
+                    Stream.of(Ration.METHOD, BiofilterCapacity.METHOD, BiofilterSizing.METHOD),
+                    BiofilterCapacity.PARTS.stream(),
                     Stream.of(MixedTank.METHOD, NitrateFromFeed.METHOD),
                     of(DilutionMode.values(), DilutionMode::method))
             .flatMap(methods -> methods)
+            .distinct()
             .sorted(Comparator.comparing(Method::id))
             .toList();
 

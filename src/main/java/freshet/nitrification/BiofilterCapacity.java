@@ -5,6 +5,7 @@ import freshet.method.Method;
 import freshet.method.Seen;
 import freshet.method.Validity;
 import java.util.Arrays;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.DoubleStream;
@@ -27,6 +28,25 @@ public record BiofilterCapacity(
         Optional<Spread> transport,
         OptionalDouble oxygenTransportTanGPerDay) {
 
+    /** The methods it is composed of. */
+    public static final List<Method> PARTS = Stream.concat(
+                    Stream.of(
+                            Media.METHOD,
+                            MeasuredRate.METHOD,
+                            HalfOrder.METHOD,
+                            OxygenLimit.METHOD,
+                            TemperatureCredit.METHOD,
+                            PhFactor.METHOD,
+                            AlkalinityFactor.METHOD,
+                            SalinityFactor.METHOD,
+                            CarbonFactor.METHOD,
+                            FilterFlow.METHOD,
+                            SubstrateFloor.METHOD,
+                            ProteinCoefficient.METHOD,
+                            Meals.METHOD),
+                    Arrays.stream(TemperatureMethod.values()).map(TemperatureMethod::method))
+            .toList();
+
     /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "biofilter-capacity",
@@ -42,23 +62,7 @@ public record BiofilterCapacity(
             .accuracy("published rates spread five- to tenfold; lower and upper are corners of that spread, no"
                     + " confidence interval")
             .errata("multiplying every penalty on a rate measured in the field counts twice: give its own conditions")
-            .uses(Stream.concat(
-                            Stream.of(
-                                    Media.METHOD,
-                                    MeasuredRate.METHOD,
-                                    HalfOrder.METHOD,
-                                    OxygenLimit.METHOD,
-                                    TemperatureCredit.METHOD,
-                                    PhFactor.METHOD,
-                                    AlkalinityFactor.METHOD,
-                                    SalinityFactor.METHOD,
-                                    CarbonFactor.METHOD,
-                                    FilterFlow.METHOD,
-                                    SubstrateFloor.METHOD,
-                                    ProteinCoefficient.METHOD,
-                                    Meals.METHOD),
-                            Arrays.stream(TemperatureMethod.values()).map(TemperatureMethod::method))
-                    .toArray(Method[]::new));
+            .uses(PARTS.toArray(Method[]::new));
 
     /** The capacity of {@code filter} in {@code water}. */
     public static BiofilterCapacity of(Biofilter filter, FilterWater water, TemperatureMethod temperature) {

@@ -187,8 +187,7 @@ class ProblemHttpTest {
 
     @Test
     void anUnknownPathIs404() {
-        for (String path :
-                List.of("/v1", "/v1/", "/v1/ammonia", PATH + "/", PATH + "x", "/favicon.ico", "/v1/farm/assessment")) {
+        for (String path : List.of("/v1", "/v1/", "/v1/ammonia", PATH + "/", PATH + "x", "/favicon.ico")) {
             given().port(port)
                     .accept("text/html")
                     .get(path)
