@@ -13,6 +13,7 @@ import freshet.method.Seen;
  */
 public final class AlkalinityFactor {
 
+    /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "alkalinity-factor",
                     "Nitrification at low alkalinity",

@@ -1,5 +1,6 @@
 package freshet.nitrification;
 
+import freshet.ammonia.AmmoniaMethod;
 import freshet.method.Citation;
 import freshet.method.Method;
 import freshet.method.Seen;
@@ -29,7 +30,8 @@ public record BiofilterCapacity(
         OptionalDouble oxygenTransportTanGPerDay) {
 
     /** The methods it is composed of. */
-    public static final List<Method> PARTS = Stream.concat(
+    public static final List<Method> PARTS = Stream.of(
+                    Arrays.stream(TemperatureMethod.values()).map(TemperatureMethod::method),
                     Stream.of(
                             Media.METHOD,
                             MeasuredRate.METHOD,
@@ -44,7 +46,9 @@ public record BiofilterCapacity(
                             SubstrateFloor.METHOD,
                             ProteinCoefficient.METHOD,
                             Meals.METHOD),
-                    Arrays.stream(TemperatureMethod.values()).map(TemperatureMethod::method))
+                    Stream.of(AmmoniaMethod.EMERSON_1975, AmmoniaMethod.CLEGG_WHITFIELD_1995)
+                            .map(choice -> choice.dissociation().method()))
+            .flatMap(methods -> methods)
             .toList();
 
     /** Its entry in the catalogue. */

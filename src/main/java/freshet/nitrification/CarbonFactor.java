@@ -15,6 +15,7 @@ import freshet.method.Seen;
  */
 public final class CarbonFactor {
 
+    /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "carbon-factor",
                     "Nitrification beside the decay of organic carbon",

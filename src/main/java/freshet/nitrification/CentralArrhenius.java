@@ -14,7 +14,7 @@ import freshet.method.Seen;
  */
 final class CentralArrhenius implements TemperatureResponse {
 
-    public static final Method METHOD = Method.of(
+    static final Method METHOD = Method.of(
                     "central-arrhenius",
                     "Temperature of a biofilm, middle of what is published",
                     Citation.withoutDoi(

@@ -18,4 +18,15 @@ public record FilterWater(
         double tanMgPerL,
         double dissolvedOxygenMgPerL,
         double alkalinityMgPerLAsCaco3,
-        double carbonToNitrogen) {}
+        double carbonToNitrogen) {
+
+    /** Whether oxygen is below the minimum at the media. */
+    public boolean oxygenCritical() {
+        return OxygenLimit.published().critical(dissolvedOxygenMgPerL);
+    }
+
+    /** Whether a film grown at this pH may do more than one that was not. */
+    public boolean favoursAcclimatedFilm() {
+        return ph < PhFactor.ACCLIMATED_BELOW;
+    }
+}

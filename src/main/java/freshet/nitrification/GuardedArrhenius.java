@@ -14,7 +14,7 @@ import freshet.method.Seen;
  */
 final class GuardedArrhenius implements TemperatureResponse {
 
-    public static final Method METHOD = Method.of(
+    static final Method METHOD = Method.of(
                     "guarded-arrhenius",
                     "Temperature of a biofilm, cautious both ways",
                     Citation.withoutDoi(

@@ -14,6 +14,7 @@ import freshet.method.Seen;
  */
 public final class HalfOrder {
 
+    /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "harremoes-1978",
                     "Half-order kinetics of a biofilm up to a plateau",

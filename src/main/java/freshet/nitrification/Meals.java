@@ -31,6 +31,11 @@ public enum Meals {
                     new Constant("one", 2.4, "1", "2.0 to 4"))
             .accuracy("fish of 40 to 90 g at 24 °C; colder water peaks later and lower");
 
+    /** The rate at the daily peak, in the unit of {@code meanRate}. */
+    public double peakRate(double meanRate) {
+        return meanRate * peakFactor();
+    }
+
     /** Peak rate over daily mean rate. */
     public double peakFactor() {
         return METHOD.values()[ordinal()];

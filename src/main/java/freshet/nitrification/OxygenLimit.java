@@ -14,6 +14,7 @@ import freshet.method.Seen;
  */
 public final class OxygenLimit {
 
+    /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "hem-1994",
                     "Total ammonia that a biofilm can use with the oxygen at hand",

@@ -14,8 +14,12 @@ import freshet.method.Seen;
  */
 public final class PhFactor {
 
+    /** pH below which films grown there lose less than the equation says; this project's judgement. */
+    static final double ACCLIMATED_BELOW = 6.8;
+
     static final Range PH = new Range("ph", 6, 9, "[pH]");
 
+    /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "usepa-1993-ph",
                     "Nitrification at low pH",

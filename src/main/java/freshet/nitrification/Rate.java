@@ -20,4 +20,18 @@ public record Rate(
         OptionalDouble upper,
         double plateau,
         double reference,
-        Factors factors) {}
+        Factors factors) {
+
+    /** Differences of this relative size are rounding. */
+    private static final double ROUNDING = 1e-9;
+
+    /** Whether the estimate is above the rate it was made from. */
+    public boolean aboveReference() {
+        return estimate > reference * (1 + ROUNDING);
+    }
+
+    /** Whether the estimate is above the high corner of its published spread. */
+    public boolean aboveSpread() {
+        return upper.isPresent() && estimate > upper.getAsDouble() * (1 + ROUNDING);
+    }
+}

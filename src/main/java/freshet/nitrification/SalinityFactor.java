@@ -16,6 +16,7 @@ public final class SalinityFactor {
     /** Practical salinity up to which nothing is lost. */
     static final double HARMLESS = 5;
 
+    /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "salinity-factor",
                     "Nitrification of an adapted film in saline water",

@@ -13,6 +13,7 @@ import freshet.method.Seen;
  */
 public final class SubstrateFloor {
 
+    /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "rittmann-mccarty-1980",
                     "Least total ammonia that sustains a film of nitrifiers",

@@ -16,6 +16,7 @@ public final class TemperatureCredit {
 
     static final Range TEMPERATURE = new Range("temperature_c", 8, 34, "Cel");
 
+    /** Its entry in the catalogue. */
     public static final Method METHOD = Method.of(
                     "temperature-credit",
                     "Limits to the credit for temperature",

@@ -14,7 +14,7 @@ import freshet.method.Seen;
  */
 final class UsEpa1993 implements TemperatureResponse {
 
-    public static final Method METHOD = Method.of(
+    static final Method METHOD = Method.of(
                     "usepa-1993",
                     "Temperature of nitrifiers in suspension",
                     Citation.withoutDoi(

@@ -13,7 +13,7 @@ import freshet.method.Seen;
  */
 final class WortmanWheaton1991 implements TemperatureResponse {
 
-    public static final Method METHOD = Method.of(
+    static final Method METHOD = Method.of(
                     "wortman-wheaton-1991",
                     "Temperature of a rotating drum, linear",
                     Citation.withoutDoi(

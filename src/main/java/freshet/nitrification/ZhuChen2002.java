@@ -14,7 +14,7 @@ import freshet.method.Seen;
  */
 final class ZhuChen2002 implements TemperatureResponse {
 
-    public static final Method METHOD = Method.of(
+    static final Method METHOD = Method.of(
                     "zhu-chen-2002",
                     "Temperature of a biofilm limited by ammonia or by oxygen",
                     Citation.withoutDoi(

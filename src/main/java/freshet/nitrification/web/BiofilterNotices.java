@@ -9,15 +9,12 @@ import java.util.List;
 /** What the reader of any answer on a biofilter must know. */
 final class BiofilterNotices {
 
-    private static final double LEAST_OXYGEN = 2;
-    private static final double ACCLIMATED_BELOW_PH = 6.8;
-
     private final List<Notice> notices = new ArrayList<>();
 
     /** Below 2 mg/L at the media. */
     BiofilterNotices oxygen(FilterWater water) {
         return when(
-                water.dissolvedOxygenMgPerL() < LEAST_OXYGEN,
+                water.oxygenCritical(),
                 "oxygen-critical",
                 "dissolved_oxygen_mg_per_l",
                 "Below 2 mg/L at the media little is oxidized and NH3 keeps rising; fish are in danger from oxygen first.");
@@ -46,12 +43,12 @@ final class BiofilterNotices {
     /** A measured rate that is raised, and an estimate that its spread does not hold. */
     BiofilterNotices measured(Rate rate, boolean measured) {
         return when(
-                        measured && rate.estimate() > rate.reference(),
+                        measured && rate.aboveReference(),
                         "above-measured-rate",
-                        rateField(rate),
-                        "More than was ever measured on this filter: confirm it by measurement before relying on it.")
+                        rate.perVolume() ? ReferenceInputs.PER_VOLUME : ReferenceInputs.PER_AREA,
+                        "The rate is put above the one that was measured: confirm it by measurement before relying on it.")
                 .when(
-                        measured && rate.upper().orElse(Double.POSITIVE_INFINITY) < rate.estimate(),
+                        measured && rate.aboveSpread(),
                         "above-published-spread",
                         "temperature_method",
                         "This temperature_method credits more than the published spread of films does.");
@@ -60,7 +57,7 @@ final class BiofilterNotices {
     /** Films grown at low pH. */
     BiofilterNotices lowPh(FilterWater water) {
         return when(
-                water.ph() < ACCLIMATED_BELOW_PH,
+                water.favoursAcclimatedFilm(),
                 "acclimated-film",
                 "ph",
                 "Films grown at this pH may lose little: measure the rate. Never raise pH for capacity before the rise of"
@@ -81,9 +78,5 @@ final class BiofilterNotices {
 
     List<Notice> inOrder() {
         return notices;
-    }
-
-    private static String rateField(Rate rate) {
-        return rate.perVolume() ? "rate_g_per_m3_per_day" : "rate_g_per_m2_per_day";
     }
 }

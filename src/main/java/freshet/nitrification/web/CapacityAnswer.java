@@ -56,18 +56,20 @@ final class CapacityAnswer {
     }
 
     private static void addLoadNotices(LoadedBiofilter filter, BiofilterNotices notices) {
-        notices.when(
-                        !filter.carried(),
-                        "load-exceeds-capacity",
-                        "load_carried",
-                        "Total ammonia rises without end: the media oxidize at most "
-                                + SixDigits.text(filter.ultimateTanGPerDay()) + " g/day, with this water "
-                                + SixDigits.text(filter.bearableTanGPerDay()) + " g/day.")
+        notices.when(!filter.carried(), "load-exceeds-capacity", "load_carried", excess(filter))
                 .when(
                         filter.utilizationPercent().isEmpty(),
                         "no-capacity",
                         "utilization_percent",
                         "Nothing is oxidized at present, so there is no utilization: see limiting_factor.");
+    }
+
+    private static String excess(LoadedBiofilter filter) {
+        String media = "Total ammonia keeps rising: the media oxidize at most "
+                + SixDigits.text(filter.ultimateTanGPerDay()) + " g/day";
+        return filter.bearableTanGPerDay() < filter.ultimateTanGPerDay()
+                ? media + ", and the water through them allows " + SixDigits.text(filter.bearableTanGPerDay()) + "."
+                : media + " at this oxygen, pH, temperature and salinity.";
     }
 
     private static void addEquilibriumNotices(LoadedBiofilter filter, BiofilterNotices notices) {

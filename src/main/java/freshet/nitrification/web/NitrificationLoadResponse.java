@@ -22,10 +22,6 @@ record NitrificationLoadResponse(
 
     static NitrificationLoadResponse of(Spread tan, Meals meals, Ration ration) {
         return new NitrificationLoadResponse(
-                tan.estimate(),
-                tan.lower(),
-                tan.upper(),
-                tan.estimate() * meals.peakFactor(),
-                ration.nitrogenGPerDay());
+                tan.estimate(), tan.lower(), tan.upper(), meals.peakRate(tan.estimate()), ration.nitrogenGPerDay());
     }
 }
