@@ -6,11 +6,12 @@ import freshet.answer.FaultCode;
 import freshet.answer.Notice;
 import freshet.answer.Refusal;
 import freshet.http.binding.Controls;
+import freshet.http.binding.Controls.Format;
 import freshet.http.binding.Request;
 import freshet.http.caching.EntityTag;
 import freshet.http.limits.Sizes;
+import freshet.http.media.AnswerWriter;
 import freshet.http.media.Bytes;
-import freshet.http.media.JsonWriter;
 import freshet.http.media.Negotiation;
 import freshet.http.media.SixDigits;
 import freshet.method.Method;
@@ -19,9 +20,11 @@ import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.io.IOException;
 import java.util.ArrayList;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.OptionalDouble;
-import org.springframework.http.MediaType;
 
 /** One calculation as HTTP reaches it: GET with a query, POST with a JSON object. */
 final class Endpoint<I extends Record, O extends Record> {
@@ -29,48 +32,50 @@ final class Endpoint<I extends Record, O extends Record> {
     private static final String OPENAPI_LINK = "</openapi.yaml>; rel=\"service-desc\"";
 
     private final Calculation<I, O> calculation;
-    private final JsonWriter writer;
+    private final List<Format> formats;
+    private final Map<Format, AnswerWriter> writers = new EnumMap<>(Format.class);
     private final long tagSeed;
 
     Endpoint(Calculation<I, O> calculation, String release) {
         this.calculation = calculation;
-        writer = new JsonWriter(calculation.outputs());
+        formats = Negotiation.formats(calculation.outputs());
+        formats.forEach(format -> writers.put(format, AnswerWriter.of(format, calculation.outputs())));
         tagSeed = EntityTag.seed(calculation.path(), calculation.methods(), release);
     }
 
     void get(HttpServletRequest request, HttpServletResponse response) throws IOException {
         Request<I> read = Request.fromQuery(calculation.inputs(), request.getQueryString());
-        accept(request, read.controls());
-        String tag = EntityTag.of(tagSeed, read.fingerprint(), read.controls().compact());
+        Format format = format(read.controls(), request);
+        String tag = EntityTag.of(
+                tagSeed, read.fingerprint(), format, read.controls().compact());
         String known = request.getHeader("If-None-Match");
         boolean unchanged = known != null && !read.controls().strict() && EntityTag.matches(known, tag);
-        Bytes body = unchanged ? new Bytes(0) : compute(read, response);
+        Bytes body = unchanged ? new Bytes(0) : compute(read, format, response);
         response.setHeader("ETag", tag);
         response.setHeader("Cache-Control", "public, max-age=300");
         response.setHeader("Vary", "Accept");
         if (unchanged) {
             response.setStatus(HttpServletResponse.SC_NOT_MODIFIED);
         } else {
-            send(body, request, response);
+            send(body, format, request, response);
         }
     }
 
     void post(HttpServletRequest request, HttpServletResponse response) throws IOException {
         Negotiation.checkContentType(request);
         Request<I> read = Request.fromJson(calculation.inputs(), Sizes.body(request), request.getQueryString());
-        accept(request, read.controls());
-        Bytes body = compute(read, response);
+        Format format = format(read.controls(), request);
+        Bytes body = compute(read, format, response);
         response.setHeader("Cache-Control", "no-store");
-        send(body, request, response);
+        send(body, format, request, response);
     }
 
-    private static void accept(HttpServletRequest request, Controls controls) {
-        if (controls.format() == null) {
-            Negotiation.checkAccept(request.getHeader("Accept"));
-        }
+    private Format format(Controls controls, HttpServletRequest request) {
+        return Negotiation.format(controls.format(), request.getHeader("Accept"), formats);
     }
 
-    private Bytes compute(Request<I> read, HttpServletResponse response) {
+    private Bytes compute(Request<I> read, Format format, HttpServletResponse response) {
+        AnswerWriter writer = Objects.requireNonNull(writers.get(format));
         Answer<O> answer = calculation.function().apply(read.inputs());
         boolean compact = read.controls().compact();
         if (answer.validity().within()) {
@@ -91,8 +96,9 @@ final class Endpoint<I extends Record, O extends Record> {
         return body;
     }
 
-    private static void send(Bytes body, HttpServletRequest request, HttpServletResponse response) throws IOException {
-        response.setContentType(MediaType.APPLICATION_JSON_VALUE);
+    private static void send(Bytes body, Format format, HttpServletRequest request, HttpServletResponse response)
+            throws IOException {
+        response.setContentType(format.mediaType());
         response.setContentLength(body.length());
         if (!"HEAD".equals(request.getMethod())) {
             response.getOutputStream().write(body.array(), 0, body.length());

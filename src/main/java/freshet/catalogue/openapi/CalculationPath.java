@@ -2,8 +2,10 @@ package freshet.catalogue.openapi;
 
 import freshet.http.Calculation;
 import freshet.http.binding.Controls;
+import freshet.http.binding.Controls.Format;
 import freshet.http.binding.Input;
 import freshet.http.binding.Spelling;
+import freshet.http.media.Negotiation;
 import io.swagger.v3.oas.models.Operation;
 import io.swagger.v3.oas.models.PathItem;
 import io.swagger.v3.oas.models.headers.Header;
@@ -58,7 +60,7 @@ final class CalculationPath {
         media.setExample(example.answer());
         ApiResponse ok = new ApiResponse()
                 .description(calculation.summary())
-                .content(new Content().addMediaType("application/json", media))
+                .content(content(calculation, media))
                 .addHeaderObject("Link", header("The method (describedby) and this document (service-desc)"))
                 .addHeaderObject("ETag", header("Strong entity tag; GET only"))
                 .addHeaderObject("Cache-Control", header("public, max-age=300 for GET, no-store for POST"));
@@ -80,6 +82,16 @@ final class CalculationPath {
                         .map(java.util.TreeMap::new)
                         .toList());
         return operation;
+    }
+
+    private static Content content(Calculation<?, ?> calculation, MediaType json) {
+        Content content = new Content();
+        for (Format format : Negotiation.formats(calculation.outputs())) {
+            content.addMediaType(
+                    format.mediaType(),
+                    format == Format.JSON ? json : new MediaType().schema(Schemas.ofType("string")));
+        }
+        return content;
     }
 
     private static String description(Calculation<?, ?> calculation) {

@@ -2,10 +2,11 @@ package freshet.catalogue.openapi;
 
 import freshet.answer.Answer;
 import freshet.http.Calculation;
+import freshet.http.binding.Controls.Format;
 import freshet.http.binding.Input;
 import freshet.http.binding.Request;
+import freshet.http.media.AnswerWriter;
 import freshet.http.media.Bytes;
-import freshet.http.media.JsonWriter;
 import java.nio.charset.StandardCharsets;
 import java.util.LinkedHashMap;
 import java.util.Map;
@@ -27,7 +28,7 @@ record Example(Map<String, Object> inputs, Object answer) {
     static <I extends Record, O extends Record> Example of(Calculation<I, O> calculation) {
         Request<I> request = Request.fromQuery(calculation.inputs(), calculation.example());
         Answer<O> answer = calculation.function().apply(request.inputs());
-        Bytes json = new JsonWriter(calculation.outputs()).write(answer, false);
+        Bytes json = AnswerWriter.of(Format.JSON, calculation.outputs()).write(answer, false);
         return new Example(
                 inputs(calculation),
                 MAPPER.readValue(new String(json.array(), 0, json.length(), StandardCharsets.UTF_8), Object.class));

@@ -25,7 +25,22 @@ public record Controls(
     /** Media of an answer. */
     public enum Format {
         /** One JSON object. */
-        JSON
+        JSON("application/json"),
+        /** A table after RFC 4180. */
+        CSV("text/csv"),
+        /** One CBOR map (RFC 8949); flat answers only. */
+        CBOR("application/cbor");
+
+        private final String mediaType;
+
+        Format(String mediaType) {
+            this.mediaType = mediaType;
+        }
+
+        /** The media type. */
+        public String mediaType() {
+            return mediaType;
+        }
     }
 
     /** How much an answer says. */

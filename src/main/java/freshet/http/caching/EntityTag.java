@@ -1,5 +1,6 @@
 package freshet.http.caching;
 
+import freshet.http.binding.Controls.Format;
 import freshet.method.Method;
 import java.util.HexFormat;
 import java.util.List;
@@ -21,8 +22,9 @@ public final class EntityTag {
     }
 
     /** The tag of an answer: quoted, as the header holds it. */
-    public static String of(long seed, long fingerprint, boolean compact) {
-        return "\"" + HexFormat.of().toHexDigits(mix(mix(seed, fingerprint), compact ? 1 : 0)) + "\"";
+    public static String of(long seed, long fingerprint, Format format, boolean compact) {
+        return "\"" + HexFormat.of().toHexDigits(mix(mix(seed, fingerprint), 2L * format.ordinal() + (compact ? 1 : 0)))
+                + "\"";
     }
 
     /** Whether the value of an If-None-Match header names {@code tag}. */

@@ -1,15 +1,11 @@
 package freshet.http.media;
 
+import freshet.answer.Fault;
+import freshet.answer.FaultCode;
+import freshet.answer.Refusal;
 import freshet.http.binding.Names;
-import freshet.quantity.Reported;
 import freshet.quantity.Unit;
 import java.lang.invoke.MethodHandle;
-import java.lang.invoke.MethodHandles;
-import java.lang.invoke.MethodType;
-import java.lang.reflect.Method;
-import java.lang.reflect.ParameterizedType;
-import java.lang.reflect.RecordComponent;
-import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -55,66 +51,51 @@ public record Column(
         return Unit.ofName(name);
     }
 
-    static Column of(RecordComponent component) {
-        Reported reported = component.getAnnotation(Reported.class);
-        if (reported == null) {
-            throw new IllegalStateException("Output " + component + " does not say what it is");
-        }
-        String name = Names.snake(component.getName());
-        boolean optional = component.getType() == Optional.class || component.getType() == OptionalDouble.class;
-        Class<?> type = component.getType() == Optional.class ? argument(component) : component.getType();
-        return new Column(
-                name,
-                kind(type),
-                reported.value(),
-                optional,
-                type == List.class
-                        ? Optional.of(Table.of(argument(component).asSubclass(Record.class)))
-                        : Optional.empty(),
-                choices(type),
-                accessor(component),
-                ("\"" + name + "\":").getBytes(StandardCharsets.US_ASCII));
-    }
-
-    private static Kind kind(Class<?> type) {
-        if (type == double.class || type == OptionalDouble.class) {
-            return Kind.NUMBER;
-        }
-        if (type == int.class || type == Integer.class) {
-            return Kind.WHOLE;
-        }
-        if (type == boolean.class || type == Boolean.class) {
-            return Kind.FLAG;
-        }
-        if (type.isEnum()) {
-            return Kind.TEXT;
-        }
-        if (type == List.class) {
-            return Kind.ROWS;
-        }
-        throw new IllegalStateException("No output can be a " + type);
-    }
-
-    private static List<String> choices(Class<?> type) {
-        return type.isEnum()
-                ? List.of(type.getEnumConstants()).stream()
-                        .map(constant -> Names.kebab((Enum<?>) constant))
-                        .toList()
-                : List.of();
-    }
-
-    private static Class<?> argument(RecordComponent component) {
-        return (Class<?>) ((ParameterizedType) component.getGenericType()).getActualTypeArguments()[0];
-    }
-
-    private static MethodHandle accessor(RecordComponent component) {
+    /**
+     * Passes the value that {@code result} has for this output on to {@code sink}.
+     *
+     * @throws Refusal if a number is too large to be printed
+     */
+    void read(Record result, Sink sink) {
         try {
-            Method method = component.getAccessor();
-            method.setAccessible(true);
-            Class<?> type = component.getType() == double.class ? double.class : Object.class;
-            return MethodHandles.lookup().unreflect(method).asType(MethodType.methodType(type, Record.class));
-        } catch (IllegalAccessException inaccessible) {
-            throw new IllegalStateException(inaccessible);
+            if (kind == Kind.NUMBER && !optional) {
+                number((double) accessor.invokeExact(result), sink);
+            } else {
+                Object value = (Object) accessor.invokeExact(result);
+                other(value, sink);
+            }
+        } catch (RuntimeException | Error unchecked) {
+            throw unchecked;
+        } catch (Throwable checked) {
+            throw new IllegalStateException(checked);
         }
+    }
+
+    @SuppressWarnings("unchecked")
+    private void other(Object value, Sink sink) {
+        if (value instanceof OptionalDouble number) {
+            if (number.isPresent()) {
+                number(number.getAsDouble(), sink);
+            } else {
+                sink.absent(this);
+            }
+        } else if (value instanceof Optional<?> perhaps) {
+            perhaps.ifPresentOrElse(present -> other(present, sink), () -> sink.absent(this));
+        } else if (kind == Kind.ROWS) {
+            sink.rows(this, (List<? extends Record>) value);
+        } else {
+            sink.word(this, value instanceof Enum<?> constant ? Names.kebab(constant) : value.toString());
+        }
+    }
+
+    private void number(double value, Sink sink) {
+        if (!(Math.abs(value) < SixDigits.TOO_LARGE)) {
+            throw new Refusal(new Fault(
+                            name,
+                            FaultCode.ABOVE_MAXIMUM,
+                            "The result " + name + " would be 1e15 or more; no farm holds that: check the inputs.")
+                    .bounds(OptionalDouble.empty(), OptionalDouble.of(SixDigits.TOO_LARGE), unit().ucum()));
+        }
+        sink.number(this, value);
     }
 }

@@ -2,34 +2,31 @@ package freshet.http.media;
 
 import freshet.answer.Answer;
 import freshet.answer.Notice;
-import freshet.answer.Refusal;
 import freshet.method.Method;
 import java.util.List;
 
-/** Writes answers as flat JSON objects, most decisive key first, one line feed at the end. */
-public final class JsonWriter {
-
-    private static final int MOST_NOTICES = 5;
+/** Flat JSON objects, most decisive key first, one line feed at the end. */
+final class JsonWriter implements AnswerWriter {
 
     private final Table table;
 
-    /** A writer of one response record. */
-    public JsonWriter(Table table) {
+    JsonWriter(Table table) {
         this.table = table;
     }
 
-    /**
-     * Writes an answer.
-     *
-     * @throws Refusal if a number is too large to be printed
-     */
+    @Override
     public Bytes write(Answer<?> answer, boolean compact) {
         Bytes out = new Bytes(512);
         out.put('{');
-        JsonMembers.write(table, answer.result(), out);
+        table.read(answer.result(), new JsonMembers(out));
         method(answer.method(), compact, out);
-        JsonText.member("validity", answer.validity().within() ? "within" : "outside", out);
-        notices(answer.notices(), compact, out);
+        JsonText.member("validity", AnswerWriter.validity(answer), out);
+        List<Notice> notices = AnswerWriter.shown(answer);
+        if (!notices.isEmpty() && compact) {
+            JsonText.member("notice_codes", AnswerWriter.codes(answer), out);
+        } else if (!notices.isEmpty()) {
+            notices(notices, out);
+        }
         out.dropLast();
         out.put('}');
         out.put('\n');
@@ -44,18 +41,7 @@ public final class JsonWriter {
         }
     }
 
-    private static void notices(List<Notice> all, boolean compact, Bytes out) {
-        List<Notice> notices = all.subList(0, Math.min(MOST_NOTICES, all.size()));
-        if (notices.isEmpty()) {
-            return;
-        }
-        if (compact) {
-            JsonText.member(
-                    "notice_codes",
-                    String.join(";", notices.stream().map(Notice::code).toList()),
-                    out);
-            return;
-        }
+    private static void notices(List<Notice> notices, Bytes out) {
         JsonText.key("notices", out);
         out.put('[');
         for (Notice notice : notices) {

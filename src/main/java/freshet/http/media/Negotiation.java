@@ -1,10 +1,17 @@
 package freshet.http.media;
 
+import freshet.answer.Fault;
+import freshet.answer.FaultCode;
+import freshet.answer.Refusal;
+import freshet.http.binding.Controls.Format;
+import freshet.http.binding.Names;
 import freshet.http.problem.Problem;
 import freshet.http.problem.ProblemException;
 import freshet.http.problem.ProblemType;
 import jakarta.servlet.http.HttpServletRequest;
 import java.nio.charset.StandardCharsets;
+import java.util.Comparator;
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.springframework.http.InvalidMediaTypeException;
 import org.springframework.http.MediaType;
@@ -12,32 +19,50 @@ import org.springframework.http.MediaType;
 /** Which media types a calculation reads and writes. */
 public final class Negotiation {
 
+    private static final List<Format> FLAT = List.of(Format.JSON, Format.CSV, Format.CBOR);
+    private static final List<Format> NOT_FLAT = List.of(Format.JSON, Format.CSV);
+
     private Negotiation() {}
 
+    /** The formats that answers of this form can be given in, the preferred one first. */
+    public static List<Format> formats(Table outputs) {
+        return outputs.flat() ? FLAT : NOT_FLAT;
+    }
+
     /**
-     * Refuses a request for media that cannot be given.
+     * The format of an answer.
      *
-     * @throws ProblemException 406
+     * @param asked the control of this name, which beats the header; null if it was not given
+     * @param accept the Accept header
+     * @param formats what can be given, the preferred one first
+     * @throws Refusal if the control asks for what cannot be given
+     * @throws ProblemException 406 if the header does
      */
-    public static void checkAccept(@Nullable String accept) {
-        if (accept == null
-                || accept.isBlank()
-                || accept.equals("*/*")
-                || accept.equals(MediaType.APPLICATION_JSON_VALUE)) {
-            return;
-        }
-        try {
-            boolean json = MediaType.parseMediaTypes(accept).stream()
-                    .anyMatch(type -> type.includes(MediaType.APPLICATION_JSON) && type.getQualityValue() > 0);
-            if (json) {
-                return;
+    public static Format format(@Nullable Format asked, @Nullable String accept, List<Format> formats) {
+        if (asked != null) {
+            if (!formats.contains(asked)) {
+                throw new Refusal(new Fault(
+                                "format",
+                                FaultCode.NOT_ALLOWED,
+                                "This answer is not flat, so it cannot be given as " + Names.kebab(asked) + ".")
+                        .allowing(formats.stream().<String>map(Names::kebab).toList()));
             }
-        } catch (InvalidMediaTypeException unreadable) {
-            // Not a media type, so not one that can be given.
+            return asked;
         }
-        throw new ProblemException(Problem.of(
-                ProblemType.NOT_ACCEPTABLE,
-                "The Accept header allows no media type that can be given: application/json."));
+        if (accept == null || accept.isBlank() || accept.equals("*/*") || accept.equals(Format.JSON.mediaType())) {
+            return Format.JSON;
+        }
+        List<MediaType> ranges = ranges(accept);
+        return formats.stream()
+                .filter(format -> quality(format, ranges) > 0)
+                .max(Comparator.comparingDouble(format -> quality(format, ranges) - 1e-9 * formats.indexOf(format)))
+                .orElseThrow(() -> new ProblemException(Problem.of(
+                        ProblemType.NOT_ACCEPTABLE,
+                        "The Accept header allows no media type that can be given: "
+                                + String.join(
+                                        ", ",
+                                        formats.stream().map(Format::mediaType).toList())
+                                + ".")));
     }
 
     /**
@@ -63,5 +88,23 @@ public final class Negotiation {
         } catch (InvalidMediaTypeException unreadable) {
             return false;
         }
+    }
+
+    private static List<MediaType> ranges(String accept) {
+        try {
+            return MediaType.parseMediaTypes(accept);
+        } catch (InvalidMediaTypeException unreadable) {
+            return List.of();
+        }
+    }
+
+    /** The quality of the most specific range that includes the format; 0 if none does. */
+    private static double quality(Format format, List<MediaType> ranges) {
+        MediaType type = MediaType.valueOf(format.mediaType());
+        return ranges.stream()
+                .filter(range -> range.includes(type))
+                .max(Comparator.comparingInt(range -> range.isWildcardType() ? 0 : range.isWildcardSubtype() ? 1 : 2))
+                .map(MediaType::getQualityValue)
+                .orElse(0.0);
     }
 }

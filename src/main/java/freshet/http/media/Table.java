@@ -12,7 +12,7 @@ public final class Table {
 
     private Table(Class<? extends Record> type) {
         for (RecordComponent component : type.getRecordComponents()) {
-            columns.add(Column.of(component));
+            columns.add(ColumnReader.read(component));
         }
     }
 
@@ -28,5 +28,17 @@ public final class Table {
     /** The outputs. */
     public List<Column> columns() {
         return Collections.unmodifiableList(columns);
+    }
+
+    /** Whether every output is a single value. */
+    public boolean flat() {
+        return columns.stream().allMatch(column -> column.rows().isEmpty());
+    }
+
+    /** Passes all values of {@code result} on to {@code sink}. */
+    void read(Record result, Sink sink) {
+        for (Column column : columns) {
+            column.read(result, sink);
+        }
     }
 }

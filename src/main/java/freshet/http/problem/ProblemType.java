@@ -29,7 +29,7 @@ public enum ProblemType {
     NOT_ACCEPTABLE(
             406,
             "None of the media types asked for can be given",
-            "Leave the Accept header out, or ask for application/json."),
+            "Leave the Accept header out, or ask for application/json, text/csv or application/cbor."),
     /** The request is too large. */
     TOO_LARGE(
             413,

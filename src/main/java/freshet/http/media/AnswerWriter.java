@@ -1,0 +1,46 @@
+package freshet.http.media;
+
+import freshet.answer.Answer;
+import freshet.answer.Notice;
+import freshet.answer.Refusal;
+import freshet.http.binding.Controls.Format;
+import java.util.List;
+
+/** Writes answers in one media type. */
+public interface AnswerWriter {
+
+    /** How many notices an answer shows. */
+    int MOST_NOTICES = 5;
+
+    /**
+     * Writes an answer.
+     *
+     * @throws Refusal if a number is too large to be printed
+     */
+    Bytes write(Answer<?> answer, boolean compact);
+
+    /** The writer of a format for one response record. */
+    static AnswerWriter of(Format format, Table table) {
+        return switch (format) {
+            case JSON -> new JsonWriter(table);
+            case CSV -> new CsvWriter(table);
+            case CBOR -> new CborWriter(table);
+        };
+    }
+
+    /** The notices that are shown. */
+    static List<Notice> shown(Answer<?> answer) {
+        return answer.notices()
+                .subList(0, Math.min(MOST_NOTICES, answer.notices().size()));
+    }
+
+    /** Their codes, joined by semicolons. */
+    static String codes(Answer<?> answer) {
+        return String.join(";", shown(answer).stream().map(Notice::code).toList());
+    }
+
+    /** The validity as answers spell it. */
+    static String validity(Answer<?> answer) {
+        return answer.validity().within() ? "within" : "outside";
+    }
+}
