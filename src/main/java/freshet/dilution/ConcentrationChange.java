@@ -30,11 +30,7 @@ public record ConcentrationChange(double volumeL, double nowMgPerL, double targe
      */
     double reachableRemainder() {
         if (nowMgPerL == sourceMgPerL || remainder() < 0) {
-            boolean richer = sourceMgPerL > nowMgPerL;
-            throw unreachable(
-                    "The target lies beyond the source water, which no exchange can pass.",
-                    richer ? OptionalDouble.empty() : OptionalDouble.of(sourceMgPerL),
-                    richer ? OptionalDouble.of(sourceMgPerL) : OptionalDouble.empty());
+            throw unreachable("The target lies beyond the source water, which no exchange can pass.");
         }
         return remainder();
     }
@@ -64,7 +60,7 @@ public record ConcentrationChange(double volumeL, double nowMgPerL, double targe
             throw new Refusal(
                     "max_stage_percent",
                     FaultCode.BELOW_MINIMUM,
-                    "Stages of " + mostPercent + " % would have to be more than a million: allow larger ones.");
+                    "Stages this small would have to be more than a million: allow larger ones.");
         }
         return (int) Math.max(1, Math.ceil(raw - ROUNDING));
     }
@@ -88,7 +84,7 @@ public record ConcentrationChange(double volumeL, double nowMgPerL, double targe
 
     private void requireNotAtSource(double g, String reason) {
         if (g == 0) {
-            throw unreachable(reason, OptionalDouble.of(sourceMgPerL), OptionalDouble.empty());
+            throw unreachable(reason);
         }
     }
 
@@ -96,8 +92,10 @@ public record ConcentrationChange(double volumeL, double nowMgPerL, double targe
         return (targetMgPerL - sourceMgPerL) / (nowMgPerL - sourceMgPerL);
     }
 
-    private static Refusal unreachable(String reason, OptionalDouble minimum, OptionalDouble maximum) {
-        return new Refusal(
-                new Fault("target_mg_per_l", FaultCode.UNREACHABLE, reason).bounds(minimum, maximum, "mg/L"));
+    private Refusal unreachable(String reason) {
+        OptionalDouble source = OptionalDouble.of(sourceMgPerL);
+        boolean richer = sourceMgPerL > nowMgPerL;
+        return new Refusal(new Fault("target_mg_per_l", FaultCode.UNREACHABLE, reason)
+                .bounds(richer ? OptionalDouble.empty() : source, richer ? source : OptionalDouble.empty(), "mg/L"));
     }
 }

@@ -37,6 +37,9 @@ public record MixedTank(double volumeL, double nowMgPerL, NitrateSources sources
                     "plants cannot take up nitrate that is not there")
             .uses(NitrateFromFeed.METHOD);
 
+    /** Share of a turnover or of the way to the plateau below which a double sees a straight line. */
+    private static final double NEGLIGIBLE = 1e-18;
+
     /** Change of the stock now, g/day. */
     public double netGPerDay() {
         return sources.surplusGPerDay() + sources.exchangeLPerDay() * (sources.sourceMgPerL() - nowMgPerL) / 1000;
@@ -44,16 +47,17 @@ public record MixedTank(double volumeL, double nowMgPerL, NitrateSources sources
 
     /** Nitrate after {@code days}, mg/L. */
     public double mgPerLAfter(double days) {
-        double turnover = turnoverPerDay();
-        double effectiveDays = turnover == 0 ? days : -StrictMath.expm1(-turnover * days) / turnover;
-        return Math.max(0, nowMgPerL + slopeMgPerLPerDay() * effectiveDays);
+        // What is left of the present stock, and what came in meanwhile: no small value as a difference of large ones.
+        double turnovers = turnoverPerDay() * days;
+        double left = nowMgPerL * StrictMath.exp(-turnovers);
+        double share = turnovers < NEGLIGIBLE ? 1 : -StrictMath.expm1(-turnovers) / turnovers;
+        return Math.max(0, left + inflowMgPerLPerDay() * days * share);
     }
 
     /** Nitrate in the long run, mg/L; empty if it rises without end. */
     public OptionalDouble plateauMgPerL() {
         if (sources.exchangeLPerDay() > 0) {
-            double steady = sources.sourceMgPerL() + 1000 * sources.surplusGPerDay() / sources.exchangeLPerDay();
-            return OptionalDouble.of(Math.max(0, steady));
+            return OptionalDouble.of(Math.max(0, steadyMgPerL()));
         }
         if (sources.surplusGPerDay() > 0) {
             return OptionalDouble.empty();
@@ -63,17 +67,29 @@ public record MixedTank(double volumeL, double nowMgPerL, NitrateSources sources
 
     /** When nitrate comes to 0 because the sinks take more than there is, days; empty if it never does. */
     public OptionalDouble daysToNothing() {
-        boolean sinksWin = sources.exchangeLPerDay() > 0
-                ? sources.sourceMgPerL() * sources.exchangeLPerDay() + 1000 * sources.surplusGPerDay() < 0
-                : sources.surplusGPerDay() < 0;
+        boolean sinksWin = sources.exchangeLPerDay() > 0 ? steadyMgPerL() < 0 : sources.surplusGPerDay() < 0;
         return sinksWin ? OptionalDouble.of(daysTo(0)) : OptionalDouble.empty();
     }
 
     /** When nitrate passes {@code mgPerL}, days, for a value on its way. */
     double daysTo(double mgPerL) {
-        double turnover = turnoverPerDay();
-        double straight = (mgPerL - nowMgPerL) / slopeMgPerLPerDay();
-        return turnover == 0 ? straight : -StrictMath.log1p(-turnover * straight) / turnover;
+        if (mgPerL == nowMgPerL) {
+            return 0;
+        }
+        double straight = Math.abs((mgPerL - nowMgPerL) / slopeMgPerLPerDay());
+        double steady = steadyMgPerL();
+        double wayGone = (mgPerL - nowMgPerL) / (steady - nowMgPerL);
+        if (!(wayGone >= NEGLIGIBLE)) {
+            return straight;
+        }
+        // Near the plateau the way left must be taken as it is: 1 less nearly 1 would end in an infinite time.
+        return (wayGone < 0.5 ? -StrictMath.log1p(-wayGone) : StrictMath.log((nowMgPerL - steady) / (mgPerL - steady)))
+                / turnoverPerDay();
+    }
+
+    /** Where exchange alone would lead; negative where sinks win, not finite without exchange. */
+    private double steadyMgPerL() {
+        return sources.sourceMgPerL() + 1000 * sources.surplusGPerDay() / sources.exchangeLPerDay();
     }
 
     private double turnoverPerDay() {
@@ -82,5 +98,9 @@ public record MixedTank(double volumeL, double nowMgPerL, NitrateSources sources
 
     private double slopeMgPerLPerDay() {
         return 1000 * netGPerDay() / volumeL;
+    }
+
+    private double inflowMgPerLPerDay() {
+        return (1000 * sources.surplusGPerDay() + sources.exchangeLPerDay() * sources.sourceMgPerL()) / volumeL;
     }
 }

@@ -116,7 +116,7 @@ class ConcentrationChangeTest {
 
     @Test
     void whateverTheInputsNoNumberIsLost() {
-        double[] extremes = {0, 4.9e-324, 1e-300, 1e-12, 5, Math.nextUp(5), 9999.9999, 10_000};
+        double[] extremes = {0, 4.9e-324, 1e-300, 1e-12, 5, Math.nextUp(5.0), 9999.9999, 10_000};
         for (double now : extremes) {
             for (double target : extremes) {
                 for (double source : extremes) {

@@ -138,7 +138,13 @@ class MixedTankPropertyTest {
         return new MixedTank(
                 1000 * row.number("V"),
                 row.number("C0"),
-                new NitrateSources(row.number("P"), 0, row.number("U"), 1000 * row.number("Q"), 0, row.number("Cin")));
+                new NitrateSources(
+                        row.number("P"),
+                        Double.parseDouble(row.inputs().getOrDefault("d", "0")),
+                        row.number("U"),
+                        1000 * row.number("Q"),
+                        0,
+                        row.number("Cin")));
     }
 
     private static Stream<MixedTank> tanks(int count) {

@@ -76,8 +76,8 @@ record NitrateInputs(
                 .ifPresent(days -> notices.add(new Notice(
                         "sinks-exceed-sources",
                         "plateau_no3_n_mg_per_l",
-                        "The sinks take more than the sources bring: nitrate is gone after " + SixDigits.text(days)
-                                + " days and stays 0.")));
+                        "The sinks take more than the sources bring: nitrate is gone after " + inDays(days)
+                                + " and stays 0.")));
         if (tank.plateauMgPerL().isEmpty()) {
             notices.add(new Notice(
                     "no-plateau",
@@ -88,6 +88,10 @@ record NitrateInputs(
             notices.add(new Notice("input-not-used", "protein_percent", "It belongs to feed_kg_per_day."));
         }
         return notices;
+    }
+
+    private static String inDays(double days) {
+        return days < SixDigits.TOO_LARGE ? SixDigits.text(days) + " days" : "1e15 days or more";
     }
 
     private double productionGPerDay() {
