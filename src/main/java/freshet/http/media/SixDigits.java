@@ -27,8 +27,11 @@ public final class SixDigits {
 
     private SixDigits() {}
 
-    /** {@code value} as text. */
+    /** {@code value} as text for a sentence; one that answers do not print is told by its size. */
     public static String text(double value) {
+        if (!(Math.abs(value) < TOO_LARGE)) {
+            return Double.isNaN(value) ? "unknown" : value < 0 ? "-1e15 or less" : "1e15 or more";
+        }
         Bytes bytes = new Bytes(24);
         write(value, bytes);
         return new String(bytes.array(), 0, bytes.length(), StandardCharsets.US_ASCII);

@@ -4,7 +4,6 @@ import freshet.answer.Answer;
 import freshet.answer.Notice;
 import freshet.http.Calculation;
 import freshet.method.Method;
-import freshet.method.Validity;
 import freshet.nitrate.MixedTank;
 import freshet.nitrate.NitrateFromFeed;
 import freshet.nitrate.NitrateLimit;
@@ -64,6 +63,7 @@ class NitrateCalculations {
                         tank.mgPerLAfter(inputs.horizonDays()),
                         tank.plateauMgPerL(),
                         tank.netGPerDay()),
+                inputs,
                 notices);
     }
 
@@ -92,10 +92,10 @@ class NitrateCalculations {
             notices.add(new Notice(
                     "input-not-used", "no3_n_limit_mg_per_l", "A trajectory has no limit; see nitrate/accumulation."));
         }
-        return answer(NitrateTrajectoryResponse.of(tank, inputs.horizonDays(), request.points()), notices);
+        return answer(NitrateTrajectoryResponse.of(tank, inputs.horizonDays(), request.points()), inputs, notices);
     }
 
-    private static <R extends Record> Answer<R> answer(R response, List<Notice> notices) {
-        return new Answer<>(response, MixedTank.METHOD, Validity.WITHIN, notices);
+    private static <R extends Record> Answer<R> answer(R response, NitrateInputs inputs, List<Notice> notices) {
+        return new Answer<>(response, MixedTank.METHOD, inputs.validity(), notices);
     }
 }

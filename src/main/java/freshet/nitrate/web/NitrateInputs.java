@@ -2,9 +2,11 @@ package freshet.nitrate.web;
 
 import freshet.answer.Notice;
 import freshet.http.media.SixDigits;
+import freshet.method.Validity;
 import freshet.nitrate.MixedTank;
 import freshet.nitrate.NitrateFromFeed;
 import freshet.nitrate.NitrateSources;
+import freshet.nitrification.Ration;
 import freshet.quantity.Area;
 import freshet.quantity.ArealRate;
 import freshet.quantity.Default;
@@ -76,8 +78,8 @@ record NitrateInputs(
                 .ifPresent(days -> notices.add(new Notice(
                         "sinks-exceed-sources",
                         "plateau_no3_n_mg_per_l",
-                        "The sinks take more than the sources bring: nitrate is gone after " + inDays(days)
-                                + " and stays 0.")));
+                        "The sinks take more than the sources bring: nitrate is gone after " + SixDigits.text(days)
+                                + " days and stays 0.")));
         if (tank.plateauMgPerL().isEmpty()) {
             notices.add(new Notice(
                     "no-plateau",
@@ -90,8 +92,11 @@ record NitrateInputs(
         return notices;
     }
 
-    private static String inDays(double days) {
-        return days < SixDigits.TOO_LARGE ? SixDigits.text(days) + " days" : "1e15 days or more";
+    /** Whether the feed, if there is one, lies within the range of the method that turns it into nitrate. */
+    Validity validity() {
+        return feedKgPerDay == null || proteinPercent == null
+                ? Validity.WITHIN
+                : new Ration(feedKgPerDay, proteinPercent).validity();
     }
 
     private double productionGPerDay() {

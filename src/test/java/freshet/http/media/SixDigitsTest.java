@@ -39,6 +39,12 @@ class SixDigitsTest {
         assertThat(SixDigits.text(value)).isEqualTo(text);
     }
 
+    @ParameterizedTest
+    @CsvSource({"1e15, 1e15 or more", "Infinity, 1e15 or more", "-1e300, -1e15 or less", "NaN, unknown"})
+    void whatIsNotPrintedIsToldByItsSize(double value, String text) {
+        assertThat(SixDigits.text(value)).isEqualTo(text);
+    }
+
     @Test
     void aMillionRandomValuesAgreeWithExactArithmetic() {
         SplittableRandom random = new SplittableRandom(6);

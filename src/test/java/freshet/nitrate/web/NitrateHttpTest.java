@@ -141,6 +141,13 @@ class NitrateHttpTest {
                 .body("notices.code", hasItem("sinks-exceed-sources"));
     }
 
+    @Test
+    void feedOutsideTheRangeOfItsMethodMarksTheAnswer() {
+        get(ACCUMULATION + "&feed_kg_per_day=10&protein_percent=60").body("validity", equalTo("outside"));
+        get(ACCUMULATION + "&feed_kg_per_day=10&protein_percent=55").body("validity", equalTo("within"));
+        get(ACCUMULATION + "&no3_n_production_g_per_day=10&protein_percent=60").body("validity", equalTo("within"));
+    }
+
     private ValidatableResponse get(String path) {
         return given().port(port).get(path).then().statusCode(200);
     }
