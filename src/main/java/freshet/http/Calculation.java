@@ -61,9 +61,29 @@ public record Calculation<I extends Record, O extends Record>(
         return new Calculation<>(path, summary, cautions, inputs, outputs, responseType, function, methods, query);
     }
 
+    /**
+     * Computes.
+     *
+     * @param strict whether inputs outside the range that the method's source states are refused
+     * @throws freshet.answer.Refusal where there is no answer
+     */
+    Answer<O> answer(I request, boolean strict) {
+        return StatedRange.check(function.apply(request), strict);
+    }
+
+    /** Whether it answers rows of a series too. */
+    public boolean hasSeries() {
+        return outputs.flat();
+    }
+
     /** The address. */
     public String address() {
         return "/v1/" + path;
+    }
+
+    /** The address of its series, if it has one. */
+    public String seriesAddress() {
+        return address() + "/series";
     }
 
     /** What it computes, as a name: {@code AmmoniaSpeciation}. */

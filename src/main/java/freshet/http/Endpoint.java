@@ -1,10 +1,6 @@
 package freshet.http;
 
 import freshet.answer.Answer;
-import freshet.answer.Fault;
-import freshet.answer.FaultCode;
-import freshet.answer.Notice;
-import freshet.answer.Refusal;
 import freshet.http.binding.Controls;
 import freshet.http.binding.Controls.Format;
 import freshet.http.binding.Request;
@@ -13,18 +9,14 @@ import freshet.http.limits.Sizes;
 import freshet.http.media.AnswerWriter;
 import freshet.http.media.Bytes;
 import freshet.http.media.Negotiation;
-import freshet.http.media.SixDigits;
 import freshet.method.Method;
-import freshet.method.Range;
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.io.IOException;
-import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
-import java.util.OptionalDouble;
 
 /** One calculation as HTTP reaches it: GET with a query, POST with a JSON object. */
 final class Endpoint<I extends Record, O extends Record> {
@@ -62,7 +54,7 @@ final class Endpoint<I extends Record, O extends Record> {
     }
 
     void post(HttpServletRequest request, HttpServletResponse response) throws IOException {
-        Negotiation.checkContentType(request);
+        Negotiation.body(request, List.of(Format.JSON));
         Request<I> read = Request.fromJson(calculation.inputs(), Sizes.body(request), request.getQueryString());
         Format format = format(read.controls(), request);
         Bytes body = compute(read, format, response);
@@ -76,17 +68,9 @@ final class Endpoint<I extends Record, O extends Record> {
 
     private Bytes compute(Request<I> read, Format format, HttpServletResponse response) {
         AnswerWriter writer = Objects.requireNonNull(writers.get(format));
-        Answer<O> answer = calculation.function().apply(read.inputs());
         boolean compact = read.controls().compact();
-        if (answer.validity().within()) {
-            return link(answer.method(), compact, response, writer.write(answer, compact));
-        }
-        if (read.controls().strict()) {
-            throw new Refusal(answer.validity().exceeded().stream()
-                    .map(Endpoint::outsideValidity)
-                    .toList());
-        }
-        return link(answer.method(), compact, response, writer.write(noticed(answer), compact));
+        Answer<O> answer = calculation.answer(read.inputs(), read.controls().strict());
+        return link(answer.method(), compact, response, writer.write(answer, compact));
     }
 
     private static Bytes link(Method method, boolean compact, HttpServletResponse response, Bytes body) {
@@ -103,24 +87,5 @@ final class Endpoint<I extends Record, O extends Record> {
         if (!"HEAD".equals(request.getMethod())) {
             response.getOutputStream().write(body.array(), 0, body.length());
         }
-    }
-
-    private static <R extends Record> Answer<R> noticed(Answer<R> answer) {
-        List<Notice> notices = new ArrayList<>();
-        for (Range range : answer.validity().exceeded()) {
-            notices.add(new Notice("outside-validity", range.quantity(), stated(range)));
-        }
-        notices.addAll(answer.notices());
-        return new Answer<>(answer.result(), answer.method(), answer.validity(), notices);
-    }
-
-    private static Fault outsideValidity(Range range) {
-        return new Fault(range.quantity(), FaultCode.OUTSIDE_VALIDITY, stated(range))
-                .bounds(OptionalDouble.of(range.minimum()), OptionalDouble.of(range.maximum()), range.unit());
-    }
-
-    private static String stated(Range range) {
-        return "The source of the method holds for " + range.quantity() + " " + SixDigits.text(range.minimum()) + " to "
-                + SixDigits.text(range.maximum()) + " (" + range.unit() + ").";
     }
 }

@@ -72,7 +72,12 @@ class OpenApiContractTest {
     @Test
     void everyRouteIsDocumentedAndEveryDocumentedRouteExists() {
         Set<String> served = new TreeSet<>();
-        calculations.all().forEach(calculation -> served.add(calculation.address()));
+        calculations.all().forEach(calculation -> {
+            served.add(calculation.address());
+            if (calculation.hasSeries()) {
+                served.add(calculation.seriesAddress());
+            }
+        });
         requestMappingHandlerMapping
                 .getHandlerMethods()
                 .keySet()
@@ -147,6 +152,31 @@ class OpenApiContractTest {
                     .asString();
             assertThat(query).isEqualTo(answered);
         }
+    }
+
+    @Test
+    void everyExampleOfASeriesWasReallyAnsweredSo() {
+        for (Calculation<?, ?> calculation : calculations.all()) {
+            if (calculation.hasSeries()) {
+                String path = "/paths/" + calculation.seriesAddress().replace("/", "~1") + "/post";
+                JsonNode body = document.at(path + "/requestBody/content/application~1json/example");
+                String csv = document.at(path + "/requestBody/content/text~1csv/example")
+                        .asString();
+                JsonNode documented = document.at(path + "/responses/200/content/application~1json/example");
+                assertThat(JSON.readTree(series(calculation, "application/json", body.toString())))
+                        .isEqualTo(documented);
+                assertThat(JSON.readTree(series(calculation, "text/csv", csv))).isEqualTo(documented);
+            }
+        }
+    }
+
+    private String series(Calculation<?, ?> calculation, String type, String body) {
+        return given().port(port)
+                .contentType(type)
+                .accept("application/json")
+                .body(body)
+                .post(calculation.seriesAddress())
+                .asString();
     }
 
     @Test

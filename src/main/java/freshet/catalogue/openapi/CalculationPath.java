@@ -103,7 +103,7 @@ final class CalculationPath {
         return calculation.cautions() + (rules.isEmpty() ? "" : "\n\n" + rules) + "\n\nMethods:\n\n" + methods;
     }
 
-    private static Parameter parameter(Input input, Spelling spelling, @Nullable Object example) {
+    static Parameter parameter(Input input, Spelling spelling, @Nullable Object example) {
         Parameter parameter = new Parameter()
                 .in("query")
                 .name(spelling.name())
@@ -122,7 +122,7 @@ final class CalculationPath {
         }
     }
 
-    private static Header header(String description) {
+    static Header header(String description) {
         return new Header().description(description).schema(Schemas.ofType("string"));
     }
 }

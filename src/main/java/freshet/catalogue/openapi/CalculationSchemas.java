@@ -25,7 +25,7 @@ final class CalculationSchemas {
         return schemas;
     }
 
-    private static Schema<Object> request(Calculation<?, ?> calculation) {
+    static Schema<Object> request(Calculation<?, ?> calculation) {
         Schema<Object> schema = Schemas.describe(
                 Schemas.ofType("object"), calculation.summary() + ". " + rulesInWords(calculation.inputs()));
         schema.setAdditionalProperties(false);
@@ -41,7 +41,7 @@ final class CalculationSchemas {
         return schema;
     }
 
-    private static Schema<Object> response(Calculation<?, ?> calculation, Map<String, Schema<?>> schemas) {
+    static Schema<Object> response(Calculation<?, ?> calculation, Map<String, Schema<?>> schemas) {
         Schema<Object> schema = Schemas.describe(Schemas.ofType("object"), calculation.summary());
         addColumns(schema, calculation.outputs(), calculation.noun(), schemas);
         schema.addProperty("method", Schemas.text("Id of the method, an entry of /v1/methods"));

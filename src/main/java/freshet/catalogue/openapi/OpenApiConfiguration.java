@@ -60,6 +60,10 @@ class OpenApiConfiguration {
             calculations.all().forEach(calculation -> {
                 paths.put(calculation.address(), CalculationPath.of(calculation));
                 schemas.putAll(CalculationSchemas.of(calculation));
+                if (calculation.hasSeries()) {
+                    paths.put(calculation.seriesAddress(), SeriesPath.of(calculation));
+                    SeriesPath.addSchemas(calculation, schemas);
+                }
             });
             write(document, paths, schemas);
         };

@@ -23,7 +23,7 @@ public record Controls(
         Boolean strict) {
 
     /** Media of an answer. */
-    public enum Format {
+    public enum Format implements Medium {
         /** One JSON object. */
         JSON("application/json"),
         /** A table after RFC 4180. */
@@ -37,7 +37,7 @@ public record Controls(
             this.mediaType = mediaType;
         }
 
-        /** The media type. */
+        @Override
         public String mediaType() {
             return mediaType;
         }

@@ -1,8 +1,11 @@
 package freshet.http.binding;
 
 import freshet.answer.Fault;
+import freshet.answer.Refusal;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Predicate;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -15,13 +18,39 @@ final class Draft<T extends Record> {
     private final Shape<T> shape;
     private final @Nullable Object[] values;
     private final @Nullable String[] givenBy;
+    private final @Nullable String[] constants;
     private final List<Fault> faults;
+    private boolean repeatsConstant;
 
     Draft(Shape<T> shape, List<Fault> faults) {
         this.shape = shape;
         this.faults = faults;
         values = shape.defaults();
         givenBy = new @Nullable String[values.length];
+        constants = new @Nullable String[values.length];
+    }
+
+    private Draft(Draft<T> constants, List<Fault> faults) {
+        this.shape = constants.shape;
+        this.faults = faults;
+        this.values = constants.values.clone();
+        this.givenBy = constants.givenBy.clone();
+        this.constants = constants.givenBy;
+    }
+
+    /** A row of a series for whose rows this holds the constants. */
+    Draft<T> row() {
+        return new Draft<>(this, new ArrayList<>(0));
+    }
+
+    /** What is wrong so far. */
+    List<Fault> faults() {
+        return faults;
+    }
+
+    /** Whether a value was given that all rows have already. */
+    boolean repeatsConstant() {
+        return repeatsConstant;
     }
 
     Shape.@Nullable Entry entry(String name) {
@@ -45,6 +74,47 @@ final class Draft<T extends Record> {
     void text(Shape.Entry entry, String text) {
         if (claim(entry)) {
             values[entry.input().index()] = ValueReader.read(entry, text, faults);
+        }
+    }
+
+    /** The name by which an input was given; null if it was not. */
+    @Nullable
+    String givenBy(Input input) {
+        return givenBy[input.index()];
+    }
+
+    /**
+     * What is wrong with every row that has these values.
+     *
+     * @param columns the inputs that the rows may give besides; null if each row may give any
+     */
+    List<Fault> faultsOfAllRows(@Nullable Set<Input> columns) {
+        List<Fault> found = new ArrayList<>();
+        Predicate<String> possible = name -> isGiven(name) || columns == null || columns.contains(shape.input(name));
+        for (Input input : shape.inputs()) {
+            if (input.required() && !possible.test(input.name())) {
+                found.add(Wording.missing(input, input.name()));
+            }
+        }
+        for (Rule rule : shape.rules()) {
+            rule.brokenWhateverElse(this::isGiven, possible).ifPresent(found::add);
+        }
+        return found;
+    }
+
+    /** Takes a cell of a table; an empty one leaves out an input that may be left out and has no default. */
+    void cell(Shape.Entry entry, String text) {
+        if (!text.isEmpty()) {
+            text(entry, text);
+        } else if (entry.input().defaultText().isPresent()) {
+            nothing(entry);
+        }
+    }
+
+    /** Takes a cell whose number has a point where a comma is due. */
+    void decimalPoint(Shape.Entry entry, String text) {
+        if (claim(entry)) {
+            faults.add(Wording.decimalPoint(entry.spelling().name(), text));
         }
     }
 
@@ -79,6 +149,19 @@ final class Draft<T extends Record> {
         return shape.create(values);
     }
 
+    /**
+     * The request record.
+     *
+     * @throws Refusal with every fault
+     */
+    T finish() {
+        complete();
+        if (!faults.isEmpty()) {
+            throw new Refusal(faults);
+        }
+        return create();
+    }
+
     /** A number that differs between requests that differ; the same on every machine. */
     long fingerprint() {
         long hash = 0;
@@ -97,13 +180,19 @@ final class Draft<T extends Record> {
     }
 
     private boolean claim(Shape.Entry entry) {
+        int index = entry.input().index();
         String name = entry.spelling().name();
-        String earlier = givenBy[entry.input().index()];
+        String earlier = givenBy[index];
         if (earlier == null) {
-            givenBy[entry.input().index()] = name;
+            givenBy[index] = name;
             return true;
         }
-        faults.add(earlier.equals(name) ? Wording.repeated(name) : Wording.givenTwice(entry));
+        boolean constant = constants[index] != null;
+        repeatsConstant |= constant;
+        faults.add(
+                !earlier.equals(name)
+                        ? Wording.givenTwice(entry)
+                        : constant ? Wording.repeatsConstant(name) : Wording.repeated(name));
         return false;
     }
 }

@@ -1,7 +1,7 @@
 package freshet.http.binding;
 
-import freshet.answer.Fault;
-import java.util.List;
+import java.io.InputStream;
+import org.jspecify.annotations.Nullable;
 import tools.jackson.core.JacksonException;
 import tools.jackson.core.JsonParser;
 import tools.jackson.core.JsonToken;
@@ -23,37 +23,63 @@ final class JsonBinder {
             .streamReadConstraints(StreamReadConstraints.builder()
                     .maxNestingDepth(100)
                     .maxNumberLength(70_000)
+                    .maxStringLength(70_000)
                     .build())
             .build();
 
     private JsonBinder() {}
 
-    static void read(byte[] body, Draft<?> inputs, List<Fault> faults) {
-        try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), body)) {
+    /** A parser of a document that is too large to be held. */
+    static JsonParser parser(InputStream body) {
+        return FACTORY.createParser(ObjectReadContext.empty(), body);
+    }
+
+    /** Reads a body that is one object. */
+    static void read(byte[] body, Draft<?> inputs) {
+        object(body, 0, body.length, inputs, null);
+    }
+
+    /** Reads a text that is one object. */
+    static void object(byte[] text, int offset, int length, Draft<?> inputs, @Nullable Tag tag) {
+        try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), text, offset, length)) {
             if (parser.nextToken() != JsonToken.START_OBJECT) {
-                throw new UnreadableBody("The body must be one JSON object that holds the inputs.");
+                throw new UnreadableBody("The " + whole(tag) + " must be one JSON object that holds the inputs.");
             }
-            while (parser.nextToken() == JsonToken.PROPERTY_NAME) {
-                member(parser, inputs, faults);
-            }
+            members(parser, inputs, tag);
             if (parser.nextToken() != null) {
-                throw new UnreadableBody("The body must end after one JSON object.");
+                throw new UnreadableBody("The " + whole(tag) + " must end after one JSON object.");
             }
         } catch (JacksonException malformed) {
-            throw UnreadableBody.at(malformed);
+            throw UnreadableBody.at(malformed, whole(tag));
         }
     }
 
-    private static void member(JsonParser parser, Draft<?> inputs, List<Fault> faults) {
-        String name = parser.currentName();
+    /** Reads the rest of an object whose brace was read. */
+    static void members(JsonParser parser, Draft<?> inputs, @Nullable Tag tag) {
+        while (parser.nextToken() == JsonToken.PROPERTY_NAME) {
+            String name = parser.currentName();
+            if (tag != null && name.equals(Tag.NAME)) {
+                tag.read(parser, parser.nextToken(), inputs.faults());
+            } else {
+                member(name, parser, inputs);
+            }
+        }
+    }
+
+    private static String whole(@Nullable Tag tag) {
+        return tag == null ? "body" : "row";
+    }
+
+    private static void member(String name, JsonParser parser, Draft<?> inputs) {
         Shape.Entry entry = inputs.entry(name);
         JsonToken token = parser.nextToken();
         if (entry == null) {
             parser.skipChildren();
-            faults.add(
-                    Controls.SHAPE.entry(name) == null
-                            ? Wording.unknown(name, inputs.names())
-                            : Wording.belongsInQuery(name));
+            inputs.faults()
+                    .add(
+                            Controls.SHAPE.entry(name) == null
+                                    ? Wording.unknown(name, inputs.names())
+                                    : Wording.belongsInQuery(name));
         } else {
             value(parser, token, entry, inputs);
         }

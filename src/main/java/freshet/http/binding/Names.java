@@ -11,6 +11,8 @@ public final class Names {
 
     private static final LevenshteinDistance DISTANCE = LevenshteinDistance.getDefaultInstance();
 
+    private static final int MOST_EDITS = 2;
+
     private Names() {}
 
     /** The wire name of a record component: {@code tanMgPerL} is {@code tan_mg_per_l}. */
@@ -39,6 +41,28 @@ public final class Names {
         return known.stream()
                 .filter(name -> distance(folded, name) <= Math.max(1, given.length() / 2))
                 .min(Comparator.comparingInt(name -> distance(folded, name)));
+    }
+
+    /** The known name that {@code given} is nearly, so that it was hardly meant as a name of its own. */
+    public static Optional<String> almost(String given, Collection<String> known) {
+        String folded = folded(given);
+        return known.stream()
+                .filter(name -> folded.equals(folded(name)) || isNear(given, name))
+                .min(Comparator.comparingInt(name -> DISTANCE.apply(given, name)));
+    }
+
+    /** Two edits or fewer, and not every letter another. */
+    private static boolean isNear(String given, String known) {
+        int longer = Math.max(given.length(), known.length());
+        if (Math.abs(given.length() - known.length()) > MOST_EDITS) {
+            return false;
+        }
+        int edits = DISTANCE.apply(given, known);
+        return edits <= MOST_EDITS && edits < longer;
+    }
+
+    private static String folded(String name) {
+        return name.toLowerCase(Locale.ROOT).replaceAll("[\\s_-]", "");
     }
 
     private static int distance(String given, String known) {

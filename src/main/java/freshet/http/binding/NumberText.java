@@ -9,10 +9,53 @@ import java.util.regex.Pattern;
 final class NumberText {
 
     private static final int LONGEST = 32;
+    private static final int SHORT = 15;
+    private static final double[] POWERS = {
+        1, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15
+    };
     private static final Pattern MEANT = Pattern.compile(
             "[\\s\"']*([+-]?)0*(?=[.,]?[0-9])([0-9]*)(?:[.,]([0-9]*))?(?:[eE]([+-]?[0-9]{1,3}))?[fFdD]?[\\s\"']*");
 
     private NumberText() {}
+
+    /** The double nearest to the number; NaN if the text is none. */
+    static double read(String text) {
+        double plain = plain(text);
+        return !Double.isNaN(plain) || !isNumber(text) ? plain : Double.parseDouble(text);
+    }
+
+    /**
+     * The value of a decimal that is short enough for its digits and its power of ten to be exact doubles, so that their
+     * quotient is the nearest double (Clinger 1990); NaN for every other text.
+     */
+    private static double plain(String text) {
+        int length = text.length();
+        int start = length > 0 && text.charAt(0) == '-' ? 1 : 0;
+        if (length == start || length > SHORT + start || (text.charAt(start) == '0' && !isFraction(text, start + 1))) {
+            return Double.NaN;
+        }
+        long digits = 0;
+        int point = -1;
+        for (int i = start; i < length; i++) {
+            int digit = text.charAt(i) - '0';
+            if (digit >= 0 && digit <= 9) {
+                digits = 10 * digits + digit;
+            } else if (digit == '.' - '0' && point < 0 && i > start) {
+                point = i;
+            } else {
+                return Double.NaN;
+            }
+        }
+        if (point == length - 1) {
+            return Double.NaN;
+        }
+        double value = point < 0 ? digits : digits / POWERS[length - 1 - point];
+        return start == 0 ? value : -value;
+    }
+
+    private static boolean isFraction(String text, int from) {
+        return from == text.length() || text.charAt(from) == '.';
+    }
 
     /** Whether the text is a number in the grammar of RFC 8259 and not too long. */
     static boolean isNumber(String text) {

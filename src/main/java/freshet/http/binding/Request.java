@@ -40,7 +40,7 @@ public record Request<T extends Record>(T inputs, Controls controls, long finger
         Draft<T> inputs = new Draft<>(shape, faults);
         Draft<Controls> controls = new Draft<>(Controls.SHAPE, faults);
         new QueryBinder(controls, null, faults).read(query);
-        JsonBinder.read(body, inputs, faults);
+        JsonBinder.read(body, inputs);
         return finish(inputs, controls, faults);
     }
 

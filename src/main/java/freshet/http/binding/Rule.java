@@ -29,8 +29,15 @@ public record Rule(Kind kind, List<String> names, String beside) {
         TOGETHER
     }
 
+    /** What is broken by what is given, whatever is given besides of what is possible. */
+    Optional<Fault> brokenWhateverElse(Predicate<String> given, Predicate<String> possible) {
+        List<String> remedies = kind == Kind.TOGETHER ? names.subList(1, 2) : names;
+        return broken(given)
+                .filter(fault ->
+                        fault.code() == FaultCode.CONFLICT || remedies.stream().noneMatch(possible));
+    }
+
     Optional<Fault> broken(Predicate<String> given) {
-        List<String> present = names.stream().filter(given).toList();
         if (kind == Kind.TOGETHER) {
             return given.test(names.get(0)) && !given.test(names.get(1))
                     ? Optional.of(new Fault(
@@ -39,7 +46,15 @@ public record Rule(Kind kind, List<String> names, String beside) {
                             names.get(1) + " is missing: " + names.get(0) + " cannot be used without it."))
                     : Optional.empty();
         }
-        if (present.stream().filter(name -> !name.equals(beside)).count() > 1) {
+        int rivals = 0;
+        boolean none = true;
+        for (String name : names) {
+            boolean there = given.test(name);
+            none &= !there;
+            rivals += there && !name.equals(beside) ? 1 : 0;
+        }
+        if (rivals > 1) {
+            List<String> present = names.stream().filter(given).toList();
             return Optional.of(new Fault(
                             present.get(1),
                             FaultCode.CONFLICT,
@@ -47,7 +62,7 @@ public record Rule(Kind kind, List<String> names, String beside) {
                                     + " were given.")
                     .allowing(names));
         }
-        return present.isEmpty() && kind == Kind.EXACTLY_ONE
+        return none && kind == Kind.EXACTLY_ONE
                 ? Optional.of(new Fault(
                                 names.get(0),
                                 FaultCode.ONE_REQUIRED,

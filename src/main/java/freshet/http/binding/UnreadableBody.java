@@ -12,11 +12,12 @@ public final class UnreadableBody extends RuntimeException {
         super(detail, null, false, false);
     }
 
-    static UnreadableBody at(JacksonException malformed) {
+    /** Text that is not JSON; {@code whole} is what the text is to the caller. */
+    static UnreadableBody at(JacksonException malformed, String whole) {
         TokenStreamLocation location = malformed.getLocation();
         String where =
                 location == null ? "" : " at line " + location.getLineNr() + ", column " + location.getColumnNr();
-        return new UnreadableBody("The body is not well-formed JSON" + where
+        return new UnreadableBody("The " + whole + " is not well-formed JSON" + where
                 + "; numbers are written like 7.5, names and texts in double quotes.");
     }
 }

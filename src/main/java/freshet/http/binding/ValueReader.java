@@ -24,11 +24,12 @@ final class ValueReader {
     }
 
     private static @Nullable Double number(Shape.Entry entry, String text, List<Fault> faults) {
-        if (!NumberText.isNumber(text)) {
+        double given = NumberText.read(text);
+        if (Double.isNaN(given)) {
             faults.add(Wording.unreadable(entry, text));
             return null;
         }
-        double value = entry.spelling().canonical(Double.parseDouble(text));
+        double value = entry.spelling().canonical(given);
         Input input = entry.input();
         if (value < input.minimum() || value > input.maximum()) {
             faults.add(Wording.outOfBounds(entry, text, value < input.minimum()));

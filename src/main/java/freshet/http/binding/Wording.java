@@ -5,6 +5,7 @@ import freshet.answer.FaultCode;
 import freshet.http.media.SixDigits;
 import java.util.Collection;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** The sentences in which faults of reading are told. */
@@ -27,6 +28,13 @@ final class Wording {
         return new Fault(name, FaultCode.REPEATED, name + " was given more than once.");
     }
 
+    static Fault repeatsConstant(String name) {
+        return new Fault(
+                name,
+                FaultCode.REPEATED,
+                name + " stands in the query for all rows and is given by the rows as well; take one away.");
+    }
+
     static Fault unknown(String name, Collection<String> known) {
         var nearest = Names.nearest(name, known);
         return new Fault(
@@ -36,6 +44,23 @@ final class Wording {
                                 + nearest.map(near -> "; did you mean " + near + "?")
                                         .orElse("."))
                 .near(nearest);
+    }
+
+    /** A column that is carried along, unless it was meant as an input. */
+    static Fault almost(String column, String known) {
+        return new Fault(
+                        shortened(column),
+                        FaultCode.UNKNOWN,
+                        "The column " + quoted(column) + " is nearly the input " + known
+                                + ": spell it so if it is meant, or rename the column if it is only carried along.")
+                .near(Optional.of(known));
+    }
+
+    static Fault decimalPoint(String name, String text) {
+        return new Fault(
+                name,
+                FaultCode.NOT_A_NUMBER,
+                name + " is " + quoted(text) + "; with csv=semicolon a number has a decimal comma and no point.");
     }
 
     static Fault belongsInQuery(String name) {

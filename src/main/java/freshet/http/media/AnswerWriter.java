@@ -36,7 +36,9 @@ public interface AnswerWriter {
 
     /** Their codes, joined by semicolons. */
     static String codes(Answer<?> answer) {
-        return String.join(";", shown(answer).stream().map(Notice::code).toList());
+        return answer.notices().isEmpty()
+                ? ""
+                : String.join(";", shown(answer).stream().map(Notice::code).toList());
     }
 
     /** The validity as answers spell it. */

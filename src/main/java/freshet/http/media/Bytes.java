@@ -36,9 +36,21 @@ public final class Bytes {
         length += bytes.length;
     }
 
+    /** Appends a part of {@code bytes}. */
+    public void put(byte[] bytes, int offset, int count) {
+        reserve(count);
+        System.arraycopy(bytes, offset, array, length, count);
+        length += count;
+    }
+
     /** Takes back the last byte. */
     void dropLast() {
         length--;
+    }
+
+    /** Takes back all but the first {@code count} bytes. */
+    public void dropTo(int count) {
+        length = count;
     }
 
     /** Appends a whole number that is not negative. */

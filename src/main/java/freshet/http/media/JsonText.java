@@ -3,7 +3,7 @@ package freshet.http.media;
 import tools.jackson.core.io.JsonStringEncoder;
 
 /** Names and texts of a JSON object. */
-final class JsonText {
+public final class JsonText {
 
     private static final JsonStringEncoder ENCODER = JsonStringEncoder.getInstance();
 
@@ -21,7 +21,8 @@ final class JsonText {
         out.put(':');
     }
 
-    static void quoted(String value, Bytes out) {
+    /** A text in quotes, what must be escaped escaped. */
+    public static void quoted(String value, Bytes out) {
         out.put('"');
         out.put(ENCODER.quoteAsUTF8(value));
         out.put('"');

@@ -4,11 +4,13 @@ import freshet.answer.Fault;
 import freshet.answer.FaultCode;
 import freshet.answer.Refusal;
 import freshet.http.binding.Controls.Format;
+import freshet.http.binding.Medium;
 import freshet.http.binding.Names;
 import freshet.http.problem.Problem;
 import freshet.http.problem.ProblemException;
 import freshet.http.problem.ProblemType;
 import jakarta.servlet.http.HttpServletRequest;
+import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
 import java.util.Comparator;
 import java.util.List;
@@ -38,7 +40,7 @@ public final class Negotiation {
      * @throws Refusal if the control asks for what cannot be given
      * @throws ProblemException 406 if the header does
      */
-    public static Format format(@Nullable Format asked, @Nullable String accept, List<Format> formats) {
+    public static <F extends Enum<F> & Medium> F format(@Nullable F asked, @Nullable String accept, List<F> formats) {
         if (asked != null) {
             if (!formats.contains(asked)) {
                 throw new Refusal(new Fault(
@@ -49,8 +51,9 @@ public final class Negotiation {
             }
             return asked;
         }
-        if (accept == null || accept.isBlank() || accept.equals("*/*") || accept.equals(Format.JSON.mediaType())) {
-            return Format.JSON;
+        F preferred = formats.get(0);
+        if (accept == null || accept.isBlank() || accept.equals("*/*") || accept.equals(preferred.mediaType())) {
+            return preferred;
         }
         List<MediaType> ranges = ranges(accept);
         return formats.stream()
@@ -61,33 +64,48 @@ public final class Negotiation {
                         "The Accept header allows no media type that can be given: "
                                 + String.join(
                                         ", ",
-                                        formats.stream().map(Format::mediaType).toList())
+                                        formats.stream().map(Medium::mediaType).toList())
                                 + ".")));
     }
 
     /**
-     * Refuses a body that is not JSON in UTF-8.
+     * The medium of a body.
      *
-     * @throws ProblemException 415
+     * @param readable what can be read
+     * @throws ProblemException 415 if it is none of these, or in an encoding that cannot be read
      */
-    public static void checkContentType(HttpServletRequest request) {
+    public static <F extends Medium> F body(HttpServletRequest request, List<F> readable) {
         String given = request.getContentType();
-        if (!MediaType.APPLICATION_JSON_VALUE.equals(given) && !isJson(given)) {
-            throw new ProblemException(Problem.of(
-                    ProblemType.UNSUPPORTED_MEDIA,
-                    (given == null ? "The request has no Content-Type" : "The Content-Type is not one that can be read")
-                            + "; send Content-Type: application/json."));
+        for (F medium : readable) {
+            if (medium.mediaType().equals(given) || is(given, medium)) {
+                return medium;
+            }
         }
+        throw new ProblemException(Problem.of(
+                ProblemType.UNSUPPORTED_MEDIA,
+                (given == null ? "The request has no Content-Type" : "The Content-Type is not one that can be read")
+                        + "; send Content-Type: "
+                        + String.join(
+                                " or ", readable.stream().map(Medium::mediaType).toList())
+                        + ", in UTF-8."));
     }
 
-    private static boolean isJson(@Nullable String contentType) {
+    private static boolean is(@Nullable String contentType, Medium medium) {
         try {
             MediaType type = MediaType.parseMediaType(String.valueOf(contentType));
-            return type.equalsTypeAndSubtype(MediaType.APPLICATION_JSON)
-                    && (type.getCharset() == null || type.getCharset().equals(StandardCharsets.UTF_8));
+            return type.equalsTypeAndSubtype(MediaType.valueOf(medium.mediaType()))
+                    && (type.getCharset() == null || isRead(type.getCharset(), medium));
         } catch (InvalidMediaTypeException unreadable) {
             return false;
         }
+    }
+
+    /** Of tables and lines only the ASCII characters are read; what else they hold is carried along as bytes. */
+    private static boolean isRead(Charset charset, Medium medium) {
+        return charset.equals(StandardCharsets.UTF_8)
+                || !medium.mediaType().equals(Format.JSON.mediaType())
+                        && charset.contains(StandardCharsets.US_ASCII)
+                        && charset.newEncoder().maxBytesPerChar() < 2;
     }
 
     private static List<MediaType> ranges(String accept) {
@@ -99,7 +117,7 @@ public final class Negotiation {
     }
 
     /** The quality of the most specific range that includes the format; 0 if none does. */
-    private static double quality(Format format, List<MediaType> ranges) {
+    private static double quality(Medium format, List<MediaType> ranges) {
         MediaType type = MediaType.valueOf(format.mediaType());
         return ranges.stream()
                 .filter(range -> range.includes(type))

@@ -4,6 +4,7 @@ import java.lang.reflect.RecordComponent;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.stream.Stream;
 
 /** What a response record declares, read once: its outputs in the order in which answers hold them. */
 public final class Table {
@@ -28,6 +29,11 @@ public final class Table {
     /** The outputs. */
     public List<Column> columns() {
         return Collections.unmodifiableList(columns);
+    }
+
+    /** The names of the outputs, and {@code more} after them. */
+    public List<String> columnNames(List<String> more) {
+        return Stream.concat(columns.stream().map(Column::name), more.stream()).toList();
     }
 
     /** Whether every output is a single value. */

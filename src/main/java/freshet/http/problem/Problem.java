@@ -4,6 +4,7 @@ import freshet.answer.Fault;
 import freshet.answer.FaultCode;
 import java.util.List;
 import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Why a request was not answered, as RFC 9457 tells it.
@@ -12,9 +13,9 @@ import java.util.stream.Collectors;
  * @param status HTTP status
  * @param detail one sentence on this request
  * @param faults every fault of the inputs; empty if the inputs are not at fault
- * @param inBody whether the faulty inputs stand in a JSON body
+ * @param pointers where in a JSON body each fault stands; empty if the faults stand elsewhere
  */
-public record Problem(ProblemType type, int status, String detail, List<Fault> faults, boolean inBody) {
+public record Problem(ProblemType type, int status, String detail, List<Fault> faults, List<String> pointers) {
 
     private static final String UNREADABLE_BY_SERVER =
             "The request line, a header field or the framing of the body could"
@@ -28,7 +29,7 @@ public record Problem(ProblemType type, int status, String detail, List<Fault> f
 
     /** A problem with a status other than the usual one of its kind. */
     public static Problem of(ProblemType type, int status, String detail) {
-        return new Problem(type, status, detail, List.of(), false);
+        return new Problem(type, status, detail, List.of(), List.of());
     }
 
     /** What Spring or the server refused with an HTTP status and no more words. */
@@ -42,8 +43,12 @@ public record Problem(ProblemType type, int status, String detail, List<Fault> f
         };
     }
 
-    /** Inputs that could not be read, or were read and refused. */
-    public static Problem of(List<Fault> faults, boolean inBody) {
+    /**
+     * Inputs that could not be read, or were read and refused.
+     *
+     * @param holder JSON pointer of the object that holds the inputs; null if they are not in a JSON body
+     */
+    public static Problem of(List<Fault> faults, @Nullable String holder) {
         boolean unreadable = faults.stream().map(Fault::code).anyMatch(FaultCode::unreadable);
         ProblemType type = unreadable ? ProblemType.UNREADABLE : ProblemType.INVALID;
         String detail = faults.size() == 1
@@ -54,6 +59,12 @@ public record Problem(ProblemType type, int status, String detail, List<Fault> f
                                 .limit(20)
                                 .collect(Collectors.joining(", "))
                         + ".";
-        return new Problem(type, type.status(), detail, faults, inBody);
+        List<String> pointers = holder == null
+                ? List.of()
+                : faults.stream()
+                        .map(fault ->
+                                holder + "/" + fault.field().replace("~", "~0").replace("/", "~1"))
+                        .toList();
+        return new Problem(type, type.status(), detail, faults, pointers);
     }
 }

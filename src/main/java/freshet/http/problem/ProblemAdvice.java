@@ -34,6 +34,6 @@ class ProblemAdvice {
     private static Problem problem(Exception thrown) {
         return thrown instanceof ErrorResponse known
                 ? Problem.ofStatus(known.getStatusCode().value())
-                : Problems.of(thrown, false);
+                : Problems.of(thrown, null);
     }
 }

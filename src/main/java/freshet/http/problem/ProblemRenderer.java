@@ -10,7 +10,7 @@ import tools.jackson.core.StreamWriteFeature;
 import tools.jackson.core.json.JsonFactory;
 
 /** The bytes of a problem; the only place that makes them. */
-final class ProblemRenderer {
+public final class ProblemRenderer {
 
     private static final int LONGEST_INSTANCE = 200;
     private static final int MOST_FAULTS = 100;
@@ -20,7 +20,8 @@ final class ProblemRenderer {
 
     private ProblemRenderer() {}
 
-    static byte[] render(Problem problem, String instance, boolean compact) {
+    /** A JSON object, a line feed at its end; {@code instance} is the path of the request. */
+    public static byte[] render(Problem problem, String instance, boolean compact) {
         ByteArrayOutputStream bytes = new ByteArrayOutputStream(512);
         try (JsonGenerator json = FACTORY.createGenerator(ObjectWriteContext.empty(), bytes)) {
             json.writeStartObject();
@@ -53,18 +54,21 @@ final class ProblemRenderer {
             return;
         }
         json.writeArrayPropertyStart("errors");
-        problem.faults().stream().limit(MOST_FAULTS).forEach(fault -> fault(fault, problem.inBody(), json));
+        for (int i = 0; i < Math.min(MOST_FAULTS, problem.faults().size()); i++) {
+            String pointer =
+                    problem.pointers().isEmpty() ? "" : problem.pointers().get(i);
+            fault(problem.faults().get(i), pointer, json);
+        }
         json.writeEndArray();
     }
 
-    private static void fault(Fault fault, boolean inBody, JsonGenerator json) {
+    private static void fault(Fault fault, String pointer, JsonGenerator json) {
         json.writeStartObject();
         json.writeStringProperty("field", fault.field());
         json.writeStringProperty("code", fault.code().code());
         json.writeStringProperty("detail", fault.detail());
-        if (inBody) {
-            json.writeStringProperty(
-                    "pointer", "/" + fault.field().replace("~", "~0").replace("/", "~1"));
+        if (!pointer.isEmpty()) {
+            json.writeStringProperty("pointer", pointer);
         }
         bound("minimum", fault.minimum(), json);
         bound("maximum", fault.maximum(), json);

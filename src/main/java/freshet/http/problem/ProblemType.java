@@ -29,16 +29,19 @@ public enum ProblemType {
     NOT_ACCEPTABLE(
             406,
             "None of the media types asked for can be given",
-            "Leave the Accept header out, or ask for application/json, text/csv or application/cbor."),
+            "Leave the Accept header out, or ask for application/json, text/csv or application/cbor, of a series for application/x-ndjson."),
     /** The request is too large. */
     TOO_LARGE(
             413,
             "The request is too large",
             "A body may hold 64 KiB (otherwise 413), the path with its query 8 KiB (414), the header fields 24 KiB"
-                    + " (431)."),
+                    + " (431). A series in JSON may hold 10000 rows and 16 MiB (413); as CSV or NDJSON it has no limit, but"
+                    + " a row may have no more than 16 KiB."),
     /** The media type of the body is not one that can be read. */
     UNSUPPORTED_MEDIA(
-            415, "The media type of the body cannot be read", "Send Content-Type: application/json, in UTF-8."),
+            415,
+            "The media type of the body cannot be read",
+            "Send Content-Type: application/json, in UTF-8; to a series also text/csv or application/x-ndjson."),
     /** The service is busy. */
     BUSY(503, "The service is busy", "Nothing was computed. Send the same request again after a second."),
     /** The service failed. */

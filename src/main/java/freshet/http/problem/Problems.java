@@ -31,10 +31,14 @@ public final class Problems {
 
     private Problems() {}
 
-    /** The problem that an exception stands for; an unforeseen one is the service's own fault. */
-    public static Problem of(Exception thrown, boolean inBody) {
+    /**
+     * The problem that an exception stands for; an unforeseen one is the service's own fault.
+     *
+     * @param holder JSON pointer of the object that holds the inputs; null if they are not in a JSON body
+     */
+    public static Problem of(Exception thrown, @Nullable String holder) {
         if (thrown instanceof Refusal refusal) {
-            return Problem.of(refusal.faults(), inBody);
+            return Problem.of(refusal.faults(), holder);
         }
         if (thrown instanceof ProblemException known) {
             return known.problem();
