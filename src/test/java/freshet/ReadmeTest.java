@@ -7,6 +7,7 @@ import freshet.http.Calculation;
 import freshet.http.Calculations;
 import freshet.http.HttpTest;
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -21,6 +22,9 @@ import org.springframework.boot.test.web.server.LocalServerPort;
 class ReadmeTest {
 
     private static final Pattern EXAMPLE = Pattern.compile("\\$ curl '(http://localhost:8080)([^']+)'\n(.+\n)");
+
+    private static final Pattern EXAMPLE_WITH_BODY = Pattern.compile(
+            "\\$ curl 'http://localhost:8080([^']+)' -H 'Content-Type: ([^']+)' --data-binary '([^']+)'\n([^`]+)```");
 
     @LocalServerPort
     private int port;
@@ -40,7 +44,25 @@ class ReadmeTest {
                     .asString();
             assertThat(example.group(3)).as(example.group(2)).isEqualTo(answer);
         }
-        assertThat(readme().split("\\$ curl", -1)).hasSize(examples.size() + 1);
+        long withBody = EXAMPLE_WITH_BODY.matcher(readme()).results().count();
+        assertThat(readme().split("\\$ curl", -1)).hasSize(examples.size() + (int) withBody + 1);
+    }
+
+    @Test
+    void everyExampleWithABodyShowsTheRealAnswer() throws IOException {
+        List<MatchResult> examples =
+                EXAMPLE_WITH_BODY.matcher(readme()).results().toList();
+        assertThat(examples).isNotEmpty();
+        for (MatchResult example : examples) {
+            String answer = given().port(port)
+                    .urlEncodingEnabled(false)
+                    .accept("*/*")
+                    .header("Content-Type", example.group(2))
+                    .body(example.group(3).getBytes(StandardCharsets.UTF_8))
+                    .post(example.group(1))
+                    .asString();
+            assertThat(example.group(4)).as(example.group(1)).isEqualTo(answer.replace("\r\n", "\n"));
+        }
     }
 
     @Test

@@ -29,6 +29,7 @@ class LandingController {
 
             Every answer names its method and reference; add view=compact for controllers, strict=true to refuse inputs
             outside the range the source states. Faults come all at once, with bounds and units (see /problems).
+            POST many rows (CSV, NDJSON, JSON items) to the same path with /series after it.
             /docs interactive   /openapi.yaml   /v1/methods sources and equations   /v1/constants molar masses
             Confirm by measurement before acting on fish or water; local codes and licensed practice decide.
             """;

@@ -1,5 +1,6 @@
 package freshet.http;
 
+import static java.nio.charset.StandardCharsets.US_ASCII;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.IOException;
@@ -9,9 +10,12 @@ import java.net.Socket;
 import java.net.SocketTimeoutException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
+import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestFactory;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.springframework.beans.factory.annotation.Autowired;
 import org.springframework.boot.test.web.server.LocalManagementPort;
 import org.springframework.boot.test.web.server.LocalServerPort;
 
@@ -22,6 +26,12 @@ class RawSocketTest {
     private static final String PATH = "/v1/ammonia/speciation";
     private static final String GOOD = PATH + "?tan_mg_per_l=1.2&ph=8.1&temperature_c=26";
     private static final String LONG = "a".repeat(40_000);
+
+    /** Bytes of a TCP segment in an Ethernet frame. */
+    private static final int ETHERNET_SEGMENT = 1460;
+
+    @Autowired
+    private Calculations calculations;
 
     @LocalServerPort
     private int port;
@@ -122,6 +132,33 @@ class RawSocketTest {
                         .doesNotContain("Connection: close");
             }
         }
+    }
+
+    @TestFactory
+    List<DynamicTest> aCompactAnswerHasShortHeadersAndArrivesInOneSegment() {
+        return calculations.all().stream()
+                .filter(Calculation::hasSeries)
+                .map(calculation -> DynamicTest.dynamicTest(calculation.path(), () -> {
+                    try (Socket socket = new Socket(InetAddress.getLoopbackAddress(), port)) {
+                        for (int i = 0; i < 20; i++) {
+                            String answer = onePiece(
+                                    socket, calculation.address() + "?" + calculation.example() + "&view=compact");
+                            int headers = answer.indexOf("\r\n\r\n") + 4;
+                            assertThat(headers).isBetween(100, 600);
+                            assertThat(answer).startsWith("HTTP/1.1 200").endsWith("}\n");
+                            assertThat(answer).hasSizeLessThan(ETHERNET_SEGMENT);
+                        }
+                    }
+                }))
+                .toList();
+    }
+
+    /** What one read gives; a server that sent headers and body apart would need two. */
+    private static String onePiece(Socket socket, String target) throws IOException {
+        socket.setTcpNoDelay(true);
+        socket.getOutputStream().write(("GET " + target + " HTTP/1.1\r\nHost: a\r\n\r\n").getBytes(US_ASCII));
+        byte[] answer = new byte[8192];
+        return new String(answer, 0, Math.max(0, socket.getInputStream().read(answer)), US_ASCII);
     }
 
     private static String post(String header, String body) {

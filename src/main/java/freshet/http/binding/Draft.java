@@ -134,8 +134,8 @@ final class Draft<T extends Record> {
 
     /** Notes what is missing and which rules are broken. */
     void complete() {
-        for (Input input : shape.inputs()) {
-            if (input.required() && givenBy[input.index()] == null) {
+        for (Input input : shape.required()) {
+            if (givenBy[input.index()] == null) {
                 faults.add(Wording.missing(input, input.name()));
             }
         }

@@ -58,31 +58,25 @@ final class JsonBinder {
     static void members(JsonParser parser, Draft<?> inputs, @Nullable Tag tag) {
         while (parser.nextToken() == JsonToken.PROPERTY_NAME) {
             String name = parser.currentName();
-            if (tag != null && name.equals(Tag.NAME)) {
-                tag.read(parser, parser.nextToken(), inputs.faults());
+            Shape.Entry entry = inputs.entry(name);
+            JsonToken token = parser.nextToken();
+            if (entry != null) {
+                value(parser, token, entry, inputs);
+            } else if (tag != null && name.equals(Tag.NAME)) {
+                tag.read(parser, token, inputs.faults());
             } else {
-                member(name, parser, inputs);
+                parser.skipChildren();
+                inputs.faults()
+                        .add(
+                                Controls.SHAPE.entry(name) == null
+                                        ? Wording.unknown(name, inputs.names())
+                                        : Wording.belongsInQuery(name));
             }
         }
     }
 
     private static String whole(@Nullable Tag tag) {
         return tag == null ? "body" : "row";
-    }
-
-    private static void member(String name, JsonParser parser, Draft<?> inputs) {
-        Shape.Entry entry = inputs.entry(name);
-        JsonToken token = parser.nextToken();
-        if (entry == null) {
-            parser.skipChildren();
-            inputs.faults()
-                    .add(
-                            Controls.SHAPE.entry(name) == null
-                                    ? Wording.unknown(name, inputs.names())
-                                    : Wording.belongsInQuery(name));
-        } else {
-            value(parser, token, entry, inputs);
-        }
     }
 
     private static void value(JsonParser parser, JsonToken token, Shape.Entry entry, Draft<?> inputs) {

@@ -7,41 +7,50 @@ import java.lang.reflect.Constructor;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 
-/** Makes a record from the values of all inputs of a request, each component picking its own. */
+/**
+ * Makes a record from the values of all inputs of a request, each component taking its own. The whole way is one method
+ * handle, which the JVM compiles as one.
+ */
 final class RecordMaker<T extends Record> {
 
-    /** What one component takes from the values. */
-    interface Part {
-        @Nullable
-        Object from(@Nullable Object[] values);
-    }
+    private static final MethodType FROM_VALUES = MethodType.methodType(Object.class, Object[].class);
+    private static final MethodHandle ELEMENT = MethodHandles.arrayElementGetter(Object[].class);
 
     private final Class<T> type;
-    private final MethodHandle constructor;
-    private final Part[] parts;
+    private final MethodHandle handle;
 
-    RecordMaker(Class<T> type, List<Part> parts) {
+    /**
+     * A maker.
+     *
+     * @param parts for each component what takes it from the values: {@link #value} or the handle of a nested record
+     */
+    RecordMaker(Class<T> type, List<MethodHandle> parts) {
         this.type = type;
-        this.parts = parts.toArray(Part[]::new);
         try {
             Constructor<?> canonical = type.getDeclaredConstructors()[0];
             canonical.setAccessible(true);
-            constructor = MethodHandles.lookup()
-                    .unreflectConstructor(canonical)
-                    .asSpreader(Object[].class, parts.size())
-                    .asType(MethodType.methodType(Object.class, Object[].class));
+            MethodHandle constructor = MethodHandles.lookup().unreflectConstructor(canonical);
+            MethodHandle filtered = MethodHandles.filterArguments(
+                    constructor.asType(constructor.type().generic()), 0, parts.toArray(MethodHandle[]::new));
+            handle = MethodHandles.permuteArguments(filtered, FROM_VALUES, new int[parts.size()]);
         } catch (IllegalAccessException inaccessible) {
             throw new IllegalStateException(inaccessible);
         }
     }
 
+    /** Takes one of the values. */
+    static MethodHandle value(int index) {
+        return MethodHandles.insertArguments(ELEMENT, 1, index);
+    }
+
+    /** From the values to the record. */
+    MethodHandle handle() {
+        return handle;
+    }
+
     T create(@Nullable Object[] values) {
-        @Nullable Object[] arguments = new @Nullable Object[parts.length];
-        for (int i = 0; i < parts.length; i++) {
-            arguments[i] = parts[i].from(values);
-        }
         try {
-            return type.cast(constructor.invokeExact(arguments));
+            return type.cast((Object) handle.invokeExact(values));
         } catch (RuntimeException | Error unchecked) {
             throw unchecked;
         } catch (Throwable checked) {

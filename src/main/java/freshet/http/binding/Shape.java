@@ -4,6 +4,7 @@ import freshet.quantity.AtMostOneOf;
 import freshet.quantity.ExactlyOneOf;
 import freshet.quantity.Flat;
 import freshet.quantity.Together;
+import java.lang.invoke.MethodHandle;
 import java.lang.reflect.RecordComponent;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -27,11 +28,14 @@ public final class Shape<T extends Record> {
     private final RecordMaker<T> maker;
     private final List<Input> inputs = new ArrayList<>();
     private final Map<String, Entry> entries = new LinkedHashMap<>();
-    private final List<Rule> rules = new ArrayList<>();
+    private final List<Rule> rules;
     private final @Nullable Object[] defaults;
+    private final Input[] required;
 
     private Shape(Class<T> type) {
-        maker = read(type);
+        List<Rule> found = new ArrayList<>();
+        maker = read(type, found);
+        rules = List.copyOf(found);
         inputs.forEach(input -> input.spellings().forEach(spelling -> {
             if (entries.put(spelling.name(), new Entry(input, spelling)) != null) {
                 throw new IllegalStateException("Two inputs are called " + spelling.name());
@@ -39,6 +43,7 @@ public final class Shape<T extends Record> {
         }));
         rules.forEach(rule -> rule.names().forEach(this::input));
         defaults = inputs.stream().map(Input::defaultValue).toArray();
+        required = inputs.stream().filter(Input::required).toArray(Input[]::new);
     }
 
     /**
@@ -57,7 +62,7 @@ public final class Shape<T extends Record> {
 
     /** The rules between the inputs. */
     public List<Rule> rules() {
-        return Collections.unmodifiableList(rules);
+        return rules;
     }
 
     /** All names by which an input may be given. */
@@ -85,31 +90,36 @@ public final class Shape<T extends Record> {
         return defaults.clone();
     }
 
+    /** The inputs without which there is no answer, never to be changed. */
+    Input[] required() {
+        return required;
+    }
+
     T create(@Nullable Object[] values) {
         return maker.create(values);
     }
 
-    private <R extends Record> RecordMaker<R> read(Class<R> type) {
+    private <R extends Record> RecordMaker<R> read(Class<R> type, List<Rule> found) {
         Arrays.stream(type.getAnnotationsByType(ExactlyOneOf.class))
-                .forEach(group -> rules.add(new Rule(Rule.Kind.EXACTLY_ONE, List.of(group.value()), group.beside())));
+                .forEach(group -> found.add(new Rule(Rule.Kind.EXACTLY_ONE, List.of(group.value()), group.beside())));
         Arrays.stream(type.getAnnotationsByType(AtMostOneOf.class))
-                .forEach(group -> rules.add(new Rule(Rule.Kind.AT_MOST_ONE, List.of(group.value()))));
+                .forEach(group -> found.add(new Rule(Rule.Kind.AT_MOST_ONE, List.of(group.value()))));
         Arrays.stream(type.getAnnotationsByType(Together.class))
-                .forEach(pair -> rules.add(new Rule(Rule.Kind.TOGETHER, List.of(pair.given(), pair.needs()))));
-        List<RecordMaker.Part> parts = new ArrayList<>();
+                .forEach(pair -> found.add(new Rule(Rule.Kind.TOGETHER, List.of(pair.given(), pair.needs()))));
+        List<MethodHandle> parts = new ArrayList<>();
         for (RecordComponent component : type.getRecordComponents()) {
-            parts.add(component.isAnnotationPresent(Flat.class) ? nested(component) : leaf(component));
+            parts.add(component.isAnnotationPresent(Flat.class) ? nested(component, found) : leaf(component));
         }
         return new RecordMaker<>(type, parts);
     }
 
-    private RecordMaker.Part nested(RecordComponent component) {
-        return read(component.getType().asSubclass(Record.class))::create;
+    private MethodHandle nested(RecordComponent component, List<Rule> found) {
+        return read(component.getType().asSubclass(Record.class), found).handle();
     }
 
-    private RecordMaker.Part leaf(RecordComponent component) {
+    private MethodHandle leaf(RecordComponent component) {
         int index = inputs.size();
         inputs.add(InputReader.read(component, index));
-        return values -> values[index];
+        return RecordMaker.value(index);
     }
 }

@@ -5,6 +5,16 @@ import java.util.Arrays;
 /** A growing row of bytes. */
 public final class Bytes {
 
+    private static final int LONGEST_DECIMAL = 24;
+    /** The ASCII digits of 0 to 999, three to each, the first in the lowest byte. */
+    private static final int[] THREE_DIGITS = new int[1000];
+
+    static {
+        for (int i = 0; i < THREE_DIGITS.length; i++) {
+            THREE_DIGITS[i] = '0' + i / 100 | '0' + i / 10 % 10 << 8 | '0' + i % 10 << 16;
+        }
+    }
+
     private byte[] array;
     private int length;
 
@@ -53,24 +63,34 @@ public final class Bytes {
         length = count;
     }
 
-    /** Appends a whole number that is not negative. */
-    void putLong(long number) {
-        int places = 1;
-        for (long rest = number; rest >= 10; rest /= 10) {
-            places++;
+    /**
+     * Appends a decimal.
+     *
+     * @param six its six leading digits
+     * @param significant how many of them count, the rest being zeros
+     * @param whole how many digits stand before the point; 0 or less for a number below 1
+     */
+    void putDecimal(int six, int significant, int whole) {
+        reserve(LONGEST_DECIMAL);
+        long digits = THREE_DIGITS[six / 1000] | (long) THREE_DIGITS[six % 1000] << 24;
+        int at = length;
+        if (whole <= 0) {
+            array[at++] = '0';
         }
-        putPadded(number, places);
+        for (int i = 0; i < whole; i++) {
+            array[at++] = i < 6 ? digit(digits, i) : (byte) '0';
+        }
+        if (significant > whole) {
+            array[at++] = '.';
+        }
+        for (int i = whole; i < significant; i++) {
+            array[at++] = i < 0 ? (byte) '0' : digit(digits, i);
+        }
+        length = at;
     }
 
-    /** Appends a whole number that is not negative, with leading zeros up to the given number of places. */
-    void putPadded(long number, int places) {
-        reserve(places);
-        long rest = number;
-        for (int i = length + places - 1; i >= length; i--) {
-            array[i] = (byte) ('0' + rest % 10);
-            rest /= 10;
-        }
-        length += places;
+    private static byte digit(long digits, int place) {
+        return (byte) (digits >>> 8 * place);
     }
 
     private void reserve(int more) {

@@ -54,14 +54,14 @@ public final class SixDigits {
         }
         int exponent = exponent(size);
         double scaled = scaled(size, exponent);
-        long digits = (long) scaled;
+        int digits = (int) scaled;
         double rest = scaled - digits;
         if (Math.abs(rest - 0.5) < TIE_MARGIN) {
             // Scaling is off by at most half a unit in the last place: near a tie only the exact value decides.
             digits = new BigDecimal(size)
                     .round(ROUNDING)
                     .movePointRight(5 - exponent)
-                    .longValueExact();
+                    .intValueExact();
         } else if (rest > 0.5) {
             digits++;
         }
@@ -80,20 +80,13 @@ public final class SixDigits {
     }
 
     /** Prints digits x 10^(exponent - 5), digits having six places or being 1000000. */
-    private static void print(long digits, int exponent, Bytes out) {
-        int places = 5 - exponent;
-        long left = digits;
-        while (places > 0 && left % 10 == 0) {
-            left /= 10;
-            places--;
+    private static void print(int digits, int exponent, Bytes out) {
+        boolean carried = digits == 1_000_000;
+        int six = carried ? 100_000 : digits;
+        int significant = 6;
+        for (int left = six; left % 10 == 0; left /= 10) {
+            significant--;
         }
-        if (places <= 0) {
-            out.putLong(left * (long) POWERS[-places]);
-            return;
-        }
-        long unit = places < 19 ? (long) POWERS[places] : Long.MAX_VALUE;
-        out.putLong(left / unit);
-        out.put('.');
-        out.putPadded(left % unit, places);
+        out.putDecimal(six, significant, carried ? exponent + 2 : exponent + 1);
     }
 }

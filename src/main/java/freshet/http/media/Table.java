@@ -1,20 +1,18 @@
 package freshet.http.media;
 
-import java.lang.reflect.RecordComponent;
-import java.util.ArrayList;
-import java.util.Collections;
+import java.util.Arrays;
 import java.util.List;
 import java.util.stream.Stream;
 
 /** What a response record declares, read once: its outputs in the order in which answers hold them. */
 public final class Table {
 
-    private final List<Column> columns = new ArrayList<>();
+    private final Column[] columns;
 
     private Table(Class<? extends Record> type) {
-        for (RecordComponent component : type.getRecordComponents()) {
-            columns.add(ColumnReader.read(component));
-        }
+        columns = Arrays.stream(type.getRecordComponents())
+                .map(ColumnReader::read)
+                .toArray(Column[]::new);
     }
 
     /**
@@ -28,17 +26,18 @@ public final class Table {
 
     /** The outputs. */
     public List<Column> columns() {
-        return Collections.unmodifiableList(columns);
+        return List.of(columns);
     }
 
     /** The names of the outputs, and {@code more} after them. */
     public List<String> columnNames(List<String> more) {
-        return Stream.concat(columns.stream().map(Column::name), more.stream()).toList();
+        return Stream.concat(Arrays.stream(columns).map(Column::name), more.stream())
+                .toList();
     }
 
     /** Whether every output is a single value. */
     public boolean flat() {
-        return columns.stream().allMatch(column -> column.rows().isEmpty());
+        return Arrays.stream(columns).allMatch(column -> column.rows().isEmpty());
     }
 
     /** Passes all values of {@code result} on to {@code sink}. */

@@ -3,6 +3,8 @@ package freshet.http.series;
 import freshet.http.media.Bytes;
 import jakarta.servlet.http.HttpServletResponse;
 import java.io.IOException;
+import java.util.ArrayList;
+import java.util.List;
 
 /** The answers of a series on their way out: held to the end, or sent as they come. */
 final class SeriesOutput {
@@ -11,41 +13,51 @@ final class SeriesOutput {
 
     private final HttpServletResponse response;
     private final boolean streams;
-    private final Bytes bytes = new Bytes(MUCH + 4096);
+    private final List<Bytes> held = new ArrayList<>();
+    private Bytes bytes = new Bytes(MUCH + 4096);
 
     SeriesOutput(HttpServletResponse response, boolean streams) {
         this.response = response;
         this.streams = streams;
     }
 
-    /** What was not sent yet. */
+    /** Takes what comes next. */
     Bytes bytes() {
         return bytes;
     }
 
-    void sendIfMuch() throws IOException {
+    /** Makes room when there is much. */
+    void rowEnds() throws IOException {
         if (bytes.length() >= MUCH) {
-            send();
+            if (streams) {
+                send();
+            } else {
+                held.add(bytes);
+                bytes = new Bytes(MUCH + 4096);
+            }
         }
     }
 
     /** Sends what there is, unless everything is held to the end. */
     void send() throws IOException {
         if (streams && bytes.length() > 0) {
-            write();
+            write(bytes);
+            bytes.dropTo(0);
             response.flushBuffer();
         }
     }
 
     void end() throws IOException {
+        held.add(bytes);
         if (!streams) {
-            response.setContentLength(bytes.length());
+            response.setContentLength(held.stream().mapToInt(Bytes::length).sum());
         }
-        write();
+        for (Bytes part : held) {
+            write(part);
+        }
     }
 
-    private void write() throws IOException {
-        response.getOutputStream().write(bytes.array(), 0, bytes.length());
-        bytes.dropTo(0);
+    private void write(Bytes part) throws IOException {
+        response.getOutputStream().write(part.array(), 0, part.length());
     }
 }

@@ -56,7 +56,7 @@ final class SeriesRun<I extends Record> {
             } else if (problem != null) {
                 writer.problem(rows, number, problem, out.bytes());
             }
-            out.sendIfMuch();
+            out.rowEnds();
         }
         if (bad > 0) {
             throw new ProblemException(new Problem(
