@@ -12,6 +12,12 @@ import org.springframework.context.annotation.Configuration;
 class ServerConfiguration {
 
     @Bean
+    WebServerFactoryCustomizer<TomcatServletWebServerFactory> largerWrites() {
+        return factory ->
+                factory.addConnectorCustomizers(connector -> connector.setProperty("socket.appWriteBufSize", "32768"));
+    }
+
+    @Bean
     WebServerFactoryCustomizer<TomcatServletWebServerFactory> problemsFromTheServer() {
         return factory -> factory.addContextCustomizers(context -> {
             if (context.getParent() instanceof StandardHost host) {

@@ -1,11 +1,18 @@
 package freshet.http.media;
 
+import java.lang.invoke.MethodHandles;
+import java.lang.invoke.VarHandle;
+import java.nio.ByteOrder;
 import java.util.Arrays;
 
 /** A growing row of bytes. */
 public final class Bytes {
 
-    private static final int LONGEST_DECIMAL = 24;
+    private static final VarHandle EIGHT_BYTES =
+            MethodHandles.byteArrayViewVarHandle(long[].class, ByteOrder.LITTLE_ENDIAN);
+    private static final int SIX = 6;
+    /** Zeros, a point and six digits, which are put eight bytes at a time. */
+    private static final int LONGEST_DECIMAL = 32;
     /** The ASCII digits of 0 to 999, three to each, the first in the lowest byte. */
     private static final int[] THREE_DIGITS = new int[1000];
 
@@ -74,23 +81,28 @@ public final class Bytes {
         reserve(LONGEST_DECIMAL);
         long digits = THREE_DIGITS[six / 1000] | (long) THREE_DIGITS[six % 1000] << 24;
         int at = length;
+        int before = Math.min(Math.max(whole, 0), SIX);
         if (whole <= 0) {
             array[at++] = '0';
+        } else {
+            EIGHT_BYTES.set(array, at, digits);
+            at += before;
         }
-        for (int i = 0; i < whole; i++) {
-            array[at++] = i < 6 ? digit(digits, i) : (byte) '0';
-        }
+        at = zeros(whole - SIX, at);
         if (significant > whole) {
             array[at++] = '.';
-        }
-        for (int i = whole; i < significant; i++) {
-            array[at++] = i < 0 ? (byte) '0' : digit(digits, i);
+            at = zeros(-whole, at);
+            EIGHT_BYTES.set(array, at, digits >>> 8 * before);
+            at += significant - before;
         }
         length = at;
     }
 
-    private static byte digit(long digits, int place) {
-        return (byte) (digits >>> 8 * place);
+    private int zeros(int count, int from) {
+        for (int i = 0; i < count; i++) {
+            array[from + i] = '0';
+        }
+        return from + Math.max(0, count);
     }
 
     private void reserve(int more) {

@@ -18,8 +18,14 @@ public final class SixDigits {
     private static final MathContext ROUNDING = new MathContext(6, RoundingMode.HALF_EVEN);
     private static final double TIE_MARGIN = 1e-8;
     private static final double[] POWERS = new double[23];
+    private static final int LEAST_BINARY_EXPONENT = Math.getExponent(TOO_SMALL);
+    /** Largest e with 10^e not above 2^k, for each binary exponent k. */
+    private static final int[] EXPONENTS = new int[Math.getExponent(TOO_LARGE) - LEAST_BINARY_EXPONENT + 1];
 
     static {
+        for (int i = 0; i < EXPONENTS.length; i++) {
+            EXPONENTS[i] = (int) Math.floor((i + LEAST_BINARY_EXPONENT) * Math.log10(2));
+        }
         for (int i = 0; i < POWERS.length; i++) {
             POWERS[i] = Double.parseDouble("1e" + i);
         }
@@ -52,8 +58,12 @@ public final class SixDigits {
         if (value < 0) {
             out.put('-');
         }
-        int exponent = exponent(size);
+        int exponent = EXPONENTS[Math.getExponent(size) - LEAST_BINARY_EXPONENT];
         double scaled = scaled(size, exponent);
+        if (scaled >= 1e6) {
+            exponent++;
+            scaled = scaled(size, exponent);
+        }
         int digits = (int) scaled;
         double rest = scaled - digits;
         if (Math.abs(rest - 0.5) < TIE_MARGIN) {
@@ -66,12 +76,6 @@ public final class SixDigits {
             digits++;
         }
         print(digits, exponent, out);
-    }
-
-    /** Largest e with 10^e not above {@code size}, up to the rounding of a double. */
-    private static int exponent(double size) {
-        int e = (int) Math.floor(Math.getExponent(size) * 0.30102999566398120);
-        return scaled(size, e) >= 1e6 ? e + 1 : e;
     }
 
     private static double scaled(double size, int exponent) {
