@@ -1,5 +1,7 @@
 package freshet.catalogue;
 
+import freshet.catalogue.openapi.Example;
+import freshet.http.Calculation;
 import freshet.http.Calculations;
 import io.swagger.v3.oas.annotations.Hidden;
 import java.util.LinkedHashMap;
@@ -56,7 +58,7 @@ class LandingController {
                     Map<String, String> item = new LinkedHashMap<>();
                     item.put("path", calculation.address());
                     item.put("summary", calculation.summary());
-                    item.put("example", calculation.address() + "?" + calculation.example());
+                    item.put("example", example(calculation));
                     return item;
                 })
                 .toList();
@@ -69,7 +71,7 @@ class LandingController {
         String items = calculations.all().stream()
                 .map(calculation -> "<dt><a href=\"%s\">%s</a></dt><dd>%s</dd>\n"
                         .formatted(
-                                HtmlUtils.htmlEscape(calculation.address() + "?" + calculation.example()),
+                                HtmlUtils.htmlEscape(example(calculation)),
                                 calculation.path(),
                                 HtmlUtils.htmlEscape(calculation.summary())))
                 .collect(Collectors.joining());
@@ -86,9 +88,21 @@ class LandingController {
         String base = ServletUriComponentsBuilder.fromCurrentContextPath().toUriString();
         return HEAD
                 + calculations.all().stream()
-                        .map(calculation ->
-                                "curl '" + base + calculation.address() + "?" + calculation.example() + "'\n")
+                        .map(calculation -> line(base, calculation))
                         .collect(Collectors.joining())
                 + FOOT;
+    }
+
+    private static String example(Calculation<?, ?> calculation) {
+        return calculation.inputs().flat()
+                ? calculation.address() + "?" + calculation.example()
+                : "POST " + calculation.address() + " " + Example.json(calculation);
+    }
+
+    private static String line(String base, Calculation<?, ?> calculation) {
+        return calculation.inputs().flat()
+                ? "curl '" + base + calculation.address() + "?" + calculation.example() + "'\n"
+                : "curl '" + base + calculation.address() + "' -H 'Content-Type: application/json' -d '"
+                        + Example.json(calculation) + "'\n";
     }
 }

@@ -4,6 +4,17 @@ import freshet.acidity.Dickson1990;
 import freshet.acidity.DicksonRiley1979;
 import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.Nh3Guideline;
+import freshet.carbonate.AlkalinityDose;
+import freshet.carbonate.CarbonateSystem;
+import freshet.carbonate.Davies1962;
+import freshet.carbonate.Dickson1990Borate;
+import freshet.carbonate.Millero1995;
+import freshet.carbonate.Mucci1983;
+import freshet.carbonate.PlummerBusenberg1982;
+import freshet.carbonate.ProbeActivity;
+import freshet.carbonate.Takahashi1982;
+import freshet.carbonate.WatersMilleroWoosley2014;
+import freshet.dilution.Blend;
 import freshet.dilution.DilutionMode;
 import freshet.method.Method;
 import freshet.nitrate.MixedTank;
@@ -13,6 +24,10 @@ import freshet.nitrification.BiofilterSizing;
 import freshet.nitrification.LoadMethod;
 import freshet.nitrification.Ration;
 import freshet.nitrification.Stoichiometry;
+import freshet.oxygen.BensonKrause1984;
+import freshet.oxygen.StandardAtmosphere1976;
+import freshet.salinity.MilleroPoisson1981;
+import freshet.salinity.PracticalSalinity1978;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
@@ -25,6 +40,12 @@ final class Methods {
 
     private static final List<Method> ALL = Stream.of(
                     Stream.of(Dickson1990.METHOD, DicksonRiley1979.METHOD),
+                    Stream.of(CarbonateSystem.METHOD, WatersMilleroWoosley2014.METHOD, Millero1995.METHOD),
+                    Stream.of(Dickson1990Borate.METHOD, PlummerBusenberg1982.METHOD, Mucci1983.METHOD),
+                    Stream.of(ProbeActivity.METHOD, Davies1962.METHOD, Takahashi1982.METHOD),
+                    Stream.of(AlkalinityDose.METHOD, Blend.METHOD),
+                    Stream.of(BensonKrause1984.METHOD, StandardAtmosphere1976.METHOD),
+                    Stream.of(PracticalSalinity1978.METHOD, MilleroPoisson1981.METHOD),
                     of(AmmoniaMethod.values(), choice -> choice.dissociation().method()),
                     of(Nh3Guideline.values(), Nh3Guideline::method),
                     of(LoadMethod.values(), LoadMethod::method),

@@ -73,7 +73,7 @@ public record Calculation<I extends Record, O extends Record>(
 
     /** Whether it answers rows of a series too. */
     public boolean hasSeries() {
-        return outputs.flat();
+        return inputs.flat() && outputs.flat();
     }
 
     /** The address. */

@@ -16,7 +16,7 @@ final class CalculationServlet extends ProblemServlet {
 
     /** A servlet for the endpoints by their addresses. */
     CalculationServlet(Map<String, Endpoint<?, ?>> endpoints, Admission admission, RequestTimers timers) {
-        super("GET, HEAD, POST", admission, timers);
+        super(admission, timers);
         this.endpoints = endpoints;
     }
 
@@ -27,10 +27,21 @@ final class CalculationServlet extends ProblemServlet {
             throw nothingHere();
         }
         switch (request.getMethod()) {
-            case "GET", "HEAD" -> endpoint.get(request, response);
+            case "GET", "HEAD" -> {
+                if (!endpoint.takesQuery()) {
+                    throw methodNotAllowed("The inputs stand in groups: ask by POST with JSON.");
+                }
+                endpoint.get(request, response);
+            }
             case "POST" -> endpoint.post(request, response);
             default -> throw methodNotAllowed("A calculation is asked by GET with a query or by POST with JSON.");
         }
+    }
+
+    @Override
+    String allowed(HttpServletRequest request) {
+        Endpoint<?, ?> endpoint = endpoints.get(request.getServletPath());
+        return endpoint == null || endpoint.takesQuery() ? "GET, HEAD, POST, OPTIONS" : "POST, OPTIONS";
     }
 
     @Override

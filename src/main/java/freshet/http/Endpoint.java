@@ -35,6 +35,11 @@ final class Endpoint<I extends Record, O extends Record> {
         tagSeed = EntityTag.seed(calculation.path(), calculation.methods(), release);
     }
 
+    /** Whether a query can hold the inputs. */
+    boolean takesQuery() {
+        return calculation.inputs().flat();
+    }
+
     void get(HttpServletRequest request, HttpServletResponse response) throws IOException {
         Request<I> read = Request.fromQuery(calculation.inputs(), request.getQueryString());
         Format format = format(read.controls(), request);

@@ -19,21 +19,18 @@ abstract class ProblemServlet extends HttpServlet {
 
     private final transient Admission admission;
     private final transient RequestTimers timers;
-    private final String allowed;
 
-    /**
-     * A servlet.
-     *
-     * @param allowed the HTTP methods it takes, besides OPTIONS
-     */
-    ProblemServlet(String allowed, Admission admission, RequestTimers timers) {
-        this.allowed = allowed + ", OPTIONS";
+    /** A servlet with so many places. */
+    ProblemServlet(Admission admission, RequestTimers timers) {
         this.admission = admission;
         this.timers = timers;
     }
 
     /** Answers a request, or throws what is wrong with it. */
     abstract void answer(HttpServletRequest request, HttpServletResponse response) throws IOException;
+
+    /** The HTTP methods that the address of a request takes, as the Allow header lists them. */
+    abstract String allowed(HttpServletRequest request);
 
     /** JSON pointer of the object in the body that holds the inputs of a request; null if they are elsewhere. */
     abstract @Nullable String holder(HttpServletRequest request);
@@ -46,7 +43,7 @@ abstract class ProblemServlet extends HttpServlet {
             try {
                 Sizes.checkAddress(request);
                 if ("OPTIONS".equals(request.getMethod())) {
-                    response.setHeader("Allow", allowed);
+                    response.setHeader("Allow", allowed(request));
                 } else {
                     answer(request, response);
                 }
@@ -57,7 +54,7 @@ abstract class ProblemServlet extends HttpServlet {
             response.reset();
             Problem problem = Problems.of(thrown, holder(request));
             if (problem.type() == ProblemType.METHOD_NOT_ALLOWED) {
-                response.setHeader("Allow", allowed);
+                response.setHeader("Allow", allowed(request));
             }
             Problems.send(problem, thrown, request, response);
         }

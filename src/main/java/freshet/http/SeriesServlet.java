@@ -17,7 +17,7 @@ final class SeriesServlet extends ProblemServlet {
 
     /** A servlet for the series by their addresses. */
     SeriesServlet(Map<String, Series<?>> series, Admission admission, RequestTimers timers) {
-        super("POST", admission, timers);
+        super(admission, timers);
         this.series = series;
     }
 
@@ -31,6 +31,11 @@ final class SeriesServlet extends ProblemServlet {
             throw methodNotAllowed("A series is asked by POST of JSON, CSV or NDJSON.");
         }
         asked.post(request, response);
+    }
+
+    @Override
+    String allowed(HttpServletRequest request) {
+        return "POST, OPTIONS";
     }
 
     @Override

@@ -3,6 +3,7 @@ package freshet.quantity;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
+import java.util.regex.Pattern;
 
 /** The units of inputs and answers; the end of every name tells its unit. */
 public enum Unit {
@@ -17,11 +18,32 @@ public enum Unit {
     /** Percent. */
     PERCENT("%", "%", "_percent"),
     /** Milligram per litre. */
-    MG_PER_L("mg/L", "mg/L", "_mg_per_l", "_mg_per_l_as_caco3", "_mg_per_l_as_nh3", "_mg_per_l_as_nh4"),
+    MG_PER_L(
+            "mg/L",
+            "mg/L",
+            "_mg_per_l",
+            "_mg_per_l_as_caco3",
+            "_mg_per_l_as_nh3",
+            "_mg_per_l_as_nh4",
+            "_mg_per_l_as_cl2"),
     /** Milliequivalent per litre. */
     MEQ_PER_L("meq/L", "meq/L", "_meq_per_l"),
     /** German degree of carbonate hardness. */
     DKH("{dKH}", "dKH", "_dkh"),
+    /** Millimole per litre. */
+    MMOL_PER_L("mmol/L", "mmol/L", "_mmol_per_l"),
+    /** Gram per litre. */
+    G_PER_L("g/L", "g/L", "_g_per_l"),
+    /** Gram. */
+    G("g", "g", "_g"),
+    /** Kilogram per cubic metre. */
+    KG_PER_M3("kg/m3", "kg/m3", "_kg_per_m3"),
+    /** Millisiemens per centimetre. */
+    MS_PER_CM("mS/cm", "mS/cm", "_ms_per_cm"),
+    /** Hectopascal. */
+    HPA("hPa", "hPa", "_hpa"),
+    /** Metre. */
+    METRE("m", "m", "_m"),
     /** Litre. */
     L("L", "L", "_l"),
     /** Cubic metre. */
@@ -53,9 +75,9 @@ public enum Unit {
     /** Day. */
     DAY("d", "days", "_days", "days_to_limit", "days_to_alkalinity_minimum"),
     /** Hour. */
-    HOUR("h", "hours", "_hours");
+    HOUR("h", "hours", "_hours", "hours_between_steps");
 
-    private static final List<String> PH_NAMES = List.of("ph", "pka", "ph_limit", "reference_ph");
+    private static final Pattern PH_NAME = Pattern.compile("(.*[._])?(ph|pka)(_(?!factor|scale).*)?");
 
     private final String ucum;
     private final String text;
@@ -79,13 +101,10 @@ public enum Unit {
 
     /** The unit of an input or output, told by the end of its name. */
     public static Unit ofName(String name) {
-        if (PH_NAMES.contains(name)) {
-            return PH;
-        }
         return Arrays.stream(values())
                 .filter(unit -> unit.longestEndingOf(name) > 0)
                 .max(Comparator.comparingInt(unit -> unit.longestEndingOf(name)))
-                .orElse(ONE);
+                .orElse(PH_NAME.matcher(name).matches() ? PH : ONE);
     }
 
     private int longestEndingOf(String name) {

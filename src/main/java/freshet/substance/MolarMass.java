@@ -25,6 +25,12 @@ public final class MolarMass {
     public static final double OXYGEN = 31.998;
     /** Carbon dioxide, CO2. */
     public static final double CARBON_DIOXIDE = 44.009;
+    /** Bicarbonate ion, HCO3-. */
+    public static final double BICARBONATE = 61.016;
+    /** Carbonate ion, CO3--. */
+    public static final double CARBONATE = 60.008;
+    /** Calcium, Ca. */
+    public static final double CALCIUM = 40.078;
     /** Calcium carbonate per equivalent of alkalinity, CaCO3/2; g per equivalent. */
     public static final double CALCIUM_CARBONATE_EQUIVALENT = 50.043;
     /** Sodium bicarbonate, NaHCO3. */
@@ -47,6 +53,9 @@ public final class MolarMass {
             new Constant("NO3", NITRATE, "g/mol", "nitrate ion"),
             new Constant("O2", OXYGEN, "g/mol", "oxygen"),
             new Constant("CO2", CARBON_DIOXIDE, "g/mol", "carbon dioxide"),
+            new Constant("HCO3", BICARBONATE, "g/mol", "bicarbonate ion"),
+            new Constant("CO3", CARBONATE, "g/mol", "carbonate ion"),
+            new Constant("Ca", CALCIUM, "g/mol", "calcium"),
             new Constant("CaCO3/2", CALCIUM_CARBONATE_EQUIVALENT, "g/eq", "calcium carbonate per equivalent"),
             new Constant("NaHCO3", SODIUM_BICARBONATE, "g/mol", "sodium bicarbonate"),
             new Constant("C5H7O2N", CELLS, "g/mol", "cells of nitrifiers"));

@@ -13,6 +13,7 @@ import freshet.http.HttpTest;
 import freshet.http.problem.ProblemType;
 import freshet.method.Method;
 import io.restassured.response.Response;
+import io.restassured.specification.RequestSpecification;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.springframework.beans.factory.annotation.Autowired;
@@ -124,15 +125,17 @@ class CatalogueHttpTest {
         List<String> lines = landing.asString().lines().toList();
         assertThat(lines)
                 .hasSizeLessThanOrEqualTo(40)
-                .allSatisfy(line -> assertThat(line.length()).isLessThan(300));
+                .allSatisfy(line -> assertThat(line.length()).isLessThan(320));
         List<String> curls =
                 lines.stream().filter(line -> line.startsWith("curl '")).toList();
         assertThat(curls).hasSameSizeAs(calculations.all());
         for (String line : curls) {
-            given().urlEncodingEnabled(false)
-                    .get(line.substring("curl '".length(), line.length() - 1))
-                    .then()
-                    .statusCode(200);
+            String[] quoted = line.split("'");
+            RequestSpecification request = given().urlEncodingEnabled(false);
+            Response answer = quoted.length > 2
+                    ? request.contentType("application/json").body(quoted[5]).post(quoted[1])
+                    : request.get(quoted[1]);
+            assertThat(answer.statusCode()).as(line).isEqualTo(200);
         }
     }
 

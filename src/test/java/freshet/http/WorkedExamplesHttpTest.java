@@ -35,7 +35,7 @@ class WorkedExamplesHttpTest {
 
     @Test
     void noExampleIsLost() {
-        assertThat(examples()).hasSize(27);
+        assertThat(examples()).hasSize(34);
     }
 
     private void check(JsonNode example) {

@@ -26,7 +26,8 @@ final class CalculationPath {
 
     static PathItem of(Calculation<?, ?> calculation) {
         Example example = Example.of(calculation);
-        return new PathItem().get(get(calculation, example)).post(post(calculation, example));
+        PathItem path = new PathItem().post(post(calculation, example));
+        return calculation.inputs().flat() ? path.get(get(calculation, example)) : path;
     }
 
     private static Operation get(Calculation<?, ?> calculation, Example example) {

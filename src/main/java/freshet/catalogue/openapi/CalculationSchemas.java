@@ -20,6 +20,7 @@ final class CalculationSchemas {
 
     static Map<String, Schema<?>> of(Calculation<?, ?> calculation) {
         Map<String, Schema<?>> schemas = new LinkedHashMap<>();
+        addGroups(calculation, schemas);
         schemas.put(calculation.noun() + "Request", request(calculation));
         schemas.put(calculation.noun() + "Response", response(calculation, schemas));
         return schemas;
@@ -29,16 +30,41 @@ final class CalculationSchemas {
         Schema<Object> schema = Schemas.describe(
                 Schemas.ofType("object"), calculation.summary() + ". " + rulesInWords(calculation.inputs()));
         schema.setAdditionalProperties(false);
-        for (Input input : calculation.inputs().inputs()) {
-            for (Spelling spelling : input.spellings()) {
-                schema.addProperty(spelling.name(), Schemas.of(input, spelling));
-            }
-            if (alwaysRequired(input)) {
-                schema.addRequiredItem(input.name());
-            }
-        }
+        calculation.inputs().groups().forEach((group, meaning) -> {
+            Schema<Object> reference = Schemas.reference(calculation.noun() + capitalized(group));
+            schema.addProperty(group, Schemas.describe(reference, meaning));
+            schema.addRequiredItem(group);
+        });
+        addInputs(schema, calculation, "");
         rules(calculation.inputs()).forEach(schema::addExtension);
         return schema;
+    }
+
+    /** The inputs whose names begin with {@code prefix} and hold no further point. */
+    private static void addInputs(Schema<Object> schema, Calculation<?, ?> calculation, String prefix) {
+        for (Input input : calculation.inputs().inputs()) {
+            for (Spelling spelling : input.spellings()) {
+                if (spelling.name().startsWith(prefix) && spelling.name().indexOf('.', prefix.length()) < 0) {
+                    schema.addProperty(spelling.name().substring(prefix.length()), Schemas.of(input, spelling));
+                    if (alwaysRequired(input)) {
+                        schema.addRequiredItem(input.name().substring(prefix.length()));
+                    }
+                }
+            }
+        }
+    }
+
+    private static void addGroups(Calculation<?, ?> calculation, Map<String, Schema<?>> schemas) {
+        calculation.inputs().groups().forEach((group, meaning) -> {
+            Schema<Object> schema = Schemas.describe(Schemas.ofType("object"), meaning);
+            schema.setAdditionalProperties(false);
+            addInputs(schema, calculation, group + ".");
+            schemas.put(calculation.noun() + capitalized(group), schema);
+        });
+    }
+
+    private static String capitalized(String group) {
+        return Character.toUpperCase(group.charAt(0)) + group.substring(1);
     }
 
     static Schema<Object> response(Calculation<?, ?> calculation, Map<String, Schema<?>> schemas) {
@@ -89,16 +115,19 @@ final class CalculationSchemas {
                 .filter(input -> input.spellings().size() > 1)
                 .forEach(input -> (input.required() ? exactlyOne : atMostOne)
                         .add(input.spellings().stream().map(Spelling::name).toList()));
+        List<List<String>> exactlyTwo = new ArrayList<>();
         List<List<String>> together = new ArrayList<>();
         for (Rule rule : shape.rules()) {
             switch (rule.kind()) {
                 case EXACTLY_ONE -> exactlyOne.add(rule.names());
+                case EXACTLY_TWO -> exactlyTwo.add(rule.names());
                 case AT_MOST_ONE -> atMostOne.add(rule.names());
                 case TOGETHER -> together.add(rule.names());
             }
         }
         Map<String, Object> extensions = new LinkedHashMap<>();
         put("x-exactly-one-of", exactlyOne, extensions);
+        put("x-exactly-two-of", exactlyTwo, extensions);
         put("x-at-most-one-of", atMostOne, extensions);
         put("x-needs", together, extensions);
         return extensions;
@@ -114,6 +143,7 @@ final class CalculationSchemas {
                 words.append(
                         switch (name) {
                             case "x-exactly-one-of" -> "Exactly one of " + names + ". ";
+                            case "x-exactly-two-of" -> "Exactly two of " + names + ". ";
                             case "x-at-most-one-of" -> "At most one of " + names + ". ";
                             default -> "The first needs the second: " + names + ". ";
                         });

@@ -19,7 +19,7 @@ import tools.jackson.databind.json.JsonMapper;
  * @param inputs the inputs by name
  * @param answer the answer
  */
-record Example(Map<String, Object> inputs, Object answer) {
+public record Example(Map<String, Object> inputs, Object answer) {
 
     private static final JsonMapper MAPPER = JsonMapper.builder()
             .enable(DeserializationFeature.USE_BIG_DECIMAL_FOR_FLOATS)
@@ -34,13 +34,30 @@ record Example(Map<String, Object> inputs, Object answer) {
                 MAPPER.readValue(new String(json.array(), 0, json.length(), StandardCharsets.UTF_8), Object.class));
     }
 
-    private static Map<String, Object> inputs(Calculation<?, ?> calculation) {
+    /** The inputs of the example, those of a group in a map of their own. */
+    static Map<String, Object> inputs(Calculation<?, ?> calculation) {
         Map<String, Object> inputs = new LinkedHashMap<>();
         for (String pair : calculation.example().split("&", -1)) {
             String[] parts = pair.split("=", 2);
             Input input = calculation.inputs().input(parts[0]);
-            inputs.put(parts[0], Schemas.value(input, parts[1]));
+            put(inputs, parts[0], Schemas.value(input, parts[1]));
         }
         return inputs;
+    }
+
+    @SuppressWarnings("unchecked")
+    private static void put(Map<String, Object> inputs, String name, Object value) {
+        int point = name.indexOf('.');
+        if (point < 0) {
+            inputs.put(name, value);
+        } else {
+            Object group = inputs.computeIfAbsent(name.substring(0, point), added -> new LinkedHashMap<>());
+            put((Map<String, Object>) group, name.substring(point + 1), value);
+        }
+    }
+
+    /** The inputs of the example as a JSON object. */
+    public static String json(Calculation<?, ?> calculation) {
+        return MAPPER.writeValueAsString(inputs(calculation));
     }
 }

@@ -3,6 +3,7 @@ package freshet.http.binding;
 import freshet.answer.Fault;
 import freshet.answer.Refusal;
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 import java.util.function.Predicate;
@@ -57,8 +58,18 @@ final class Draft<T extends Record> {
         return shape.entry(name);
     }
 
+    boolean isGroup(String name) {
+        return shape.groups().containsKey(name);
+    }
+
+    /** All names, those of the groups too. */
     Set<String> names() {
-        return shape.names();
+        if (shape.flat()) {
+            return shape.names();
+        }
+        Set<String> names = new LinkedHashSet<>(shape.groups().keySet());
+        names.addAll(shape.names());
+        return names;
     }
 
     /** Takes a value as text if there is an input of that name; tells whether there is. */

@@ -30,10 +30,10 @@ final class InputReader {
     private final boolean required;
     private Optional<String> defaultText = Optional.empty();
 
-    private InputReader(RecordComponent component, int index) {
+    private InputReader(RecordComponent component, String prefix, int index) {
         this.component = component;
         this.index = index;
-        this.name = Names.snake(component.getName());
+        this.name = prefix + Names.snake(component.getName());
         for (Annotation annotation : component.getAnnotations()) {
             note(annotation);
         }
@@ -49,8 +49,8 @@ final class InputReader {
         }
     }
 
-    static Input read(RecordComponent component, int index) {
-        InputReader reader = new InputReader(component, index);
+    static Input read(RecordComponent component, String prefix, int index) {
+        InputReader reader = new InputReader(component, prefix, index);
         return reader.quantity == null ? reader.plain() : reader.number(reader.quantity.annotationType());
     }
 

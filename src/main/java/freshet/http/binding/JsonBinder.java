@@ -45,7 +45,7 @@ final class JsonBinder {
             if (parser.nextToken() != JsonToken.START_OBJECT) {
                 throw new UnreadableBody("The " + whole(tag) + " must be one JSON object that holds the inputs.");
             }
-            members(parser, inputs, tag);
+            members(parser, "", inputs, tag);
             if (parser.nextToken() != null) {
                 throw new UnreadableBody("The " + whole(tag) + " must end after one JSON object.");
             }
@@ -54,16 +54,18 @@ final class JsonBinder {
         }
     }
 
-    /** Reads the rest of an object whose brace was read. */
-    static void members(JsonParser parser, Draft<?> inputs, @Nullable Tag tag) {
+    /** Reads the rest of an object whose brace was read; its inputs have names that begin with {@code prefix}. */
+    static void members(JsonParser parser, String prefix, Draft<?> inputs, @Nullable Tag tag) {
         while (parser.nextToken() == JsonToken.PROPERTY_NAME) {
-            String name = parser.currentName();
+            String name = prefix.isEmpty() ? parser.currentName() : prefix + parser.currentName();
             Shape.Entry entry = inputs.entry(name);
             JsonToken token = parser.nextToken();
             if (entry != null) {
                 value(parser, token, entry, inputs);
             } else if (tag != null && name.equals(Tag.NAME)) {
                 tag.read(parser, token, inputs.faults());
+            } else if (inputs.isGroup(name)) {
+                group(parser, name, token, inputs);
             } else {
                 parser.skipChildren();
                 inputs.faults()
@@ -77,6 +79,15 @@ final class JsonBinder {
 
     private static String whole(@Nullable Tag tag) {
         return tag == null ? "body" : "row";
+    }
+
+    private static void group(JsonParser parser, String name, JsonToken token, Draft<?> inputs) {
+        if (token == JsonToken.START_OBJECT) {
+            members(parser, name + ".", inputs, null);
+        } else if (token != JsonToken.VALUE_NULL) {
+            parser.skipChildren();
+            inputs.faults().add(Wording.notAnObject(name));
+        }
     }
 
     private static void value(JsonParser parser, JsonToken token, Shape.Entry entry, Draft<?> inputs) {

@@ -71,7 +71,7 @@ public final class JsonRows<T extends Record> implements Rows<T> {
         object = token == JsonToken.START_OBJECT;
         try {
             if (object) {
-                JsonBinder.members(parser, draft, tag);
+                JsonBinder.members(parser, "", draft, tag);
             } else {
                 parser.skipChildren();
             }

@@ -23,6 +23,8 @@ public record Rule(Kind kind, List<String> names, String beside) {
     public enum Kind {
         /** Exactly one of the inputs must be given. */
         EXACTLY_ONE,
+        /** Exactly two of the inputs must be given. */
+        EXACTLY_TWO,
         /** At most one of the inputs may be given. */
         AT_MOST_ONE,
         /** If the first input is given, the second must be too. */
@@ -33,8 +35,8 @@ public record Rule(Kind kind, List<String> names, String beside) {
     Optional<Fault> brokenWhateverElse(Predicate<String> given, Predicate<String> possible) {
         List<String> remedies = kind == Kind.TOGETHER ? names.subList(1, 2) : names;
         return broken(given)
-                .filter(fault ->
-                        fault.code() == FaultCode.CONFLICT || remedies.stream().noneMatch(possible));
+                .filter(fault -> fault.code() == FaultCode.CONFLICT
+                        || remedies.stream().filter(possible).count() < wanted());
     }
 
     Optional<Fault> broken(Predicate<String> given) {
@@ -47,27 +49,37 @@ public record Rule(Kind kind, List<String> names, String beside) {
                     : Optional.empty();
         }
         int rivals = 0;
-        boolean none = true;
+        int present = 0;
         for (String name : names) {
             boolean there = given.test(name);
-            none &= !there;
+            present += there ? 1 : 0;
             rivals += there && !name.equals(beside) ? 1 : 0;
         }
-        if (rivals > 1) {
-            List<String> present = names.stream().filter(given).toList();
-            return Optional.of(new Fault(
-                            present.get(1),
-                            FaultCode.CONFLICT,
-                            "Give only one of " + String.join(", ", names) + "; " + String.join(" and ", present)
-                                    + " were given.")
-                    .allowing(names));
+        if (rivals > wanted()) {
+            return Optional.of(conflict(names.stream().filter(given).toList()));
         }
-        return none && kind == Kind.EXACTLY_ONE
-                ? Optional.of(new Fault(
-                                names.get(0),
-                                FaultCode.ONE_REQUIRED,
-                                "Give exactly one of " + String.join(", ", names) + ".")
-                        .allowing(names))
-                : Optional.empty();
+        return present < wanted() && kind != Kind.AT_MOST_ONE ? Optional.of(tooFew(given)) : Optional.empty();
+    }
+
+    private int wanted() {
+        return kind == Kind.EXACTLY_TWO ? 2 : 1;
+    }
+
+    private Fault conflict(List<String> present) {
+        return new Fault(
+                        present.get(wanted()),
+                        FaultCode.CONFLICT,
+                        "Give only " + (wanted() == 1 ? "one" : "two") + " of " + String.join(", ", names) + "; "
+                                + String.join(" and ", present) + " were given.")
+                .allowing(names);
+    }
+
+    private Fault tooFew(Predicate<String> given) {
+        String first = names.stream().filter(given.negate()).findFirst().orElseThrow();
+        return new Fault(
+                        first,
+                        FaultCode.ONE_REQUIRED,
+                        "Give exactly " + (wanted() == 1 ? "one" : "two") + " of " + String.join(", ", names) + ".")
+                .allowing(names);
     }
 }

@@ -1,13 +1,5 @@
 package freshet.http.binding;
 
-import freshet.quantity.AtMostOneOf;
-import freshet.quantity.ExactlyOneOf;
-import freshet.quantity.Flat;
-import freshet.quantity.Together;
-import java.lang.invoke.MethodHandle;
-import java.lang.reflect.RecordComponent;
-import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -26,16 +18,19 @@ public final class Shape<T extends Record> {
     record Entry(Input input, Spelling spelling) {}
 
     private final RecordMaker<T> maker;
-    private final List<Input> inputs = new ArrayList<>();
+    private final List<Input> inputs;
     private final Map<String, Entry> entries = new LinkedHashMap<>();
     private final List<Rule> rules;
+    private final Map<String, String> groups;
     private final @Nullable Object[] defaults;
     private final Input[] required;
 
     private Shape(Class<T> type) {
-        List<Rule> found = new ArrayList<>();
-        maker = read(type, found);
-        rules = List.copyOf(found);
+        ShapeReader reader = new ShapeReader();
+        maker = reader.read(type);
+        inputs = List.copyOf(reader.inputs());
+        rules = List.copyOf(reader.rules());
+        groups = Collections.unmodifiableMap(reader.groups());
         inputs.forEach(input -> input.spellings().forEach(spelling -> {
             if (entries.put(spelling.name(), new Entry(input, spelling)) != null) {
                 throw new IllegalStateException("Two inputs are called " + spelling.name());
@@ -57,12 +52,22 @@ public final class Shape<T extends Record> {
 
     /** The inputs in the order in which the record declares them. */
     public List<Input> inputs() {
-        return Collections.unmodifiableList(inputs);
+        return inputs;
     }
 
     /** The rules between the inputs. */
     public List<Rule> rules() {
         return rules;
+    }
+
+    /** What each group of inputs is, by its name; the inputs in it have names that begin with that name and a point. */
+    public Map<String, String> groups() {
+        return groups;
+    }
+
+    /** Whether no input stands in a group, so that a query or a row can hold them all. */
+    public boolean flat() {
+        return groups.isEmpty();
     }
 
     /** All names by which an input may be given. */
@@ -97,29 +102,5 @@ public final class Shape<T extends Record> {
 
     T create(@Nullable Object[] values) {
         return maker.create(values);
-    }
-
-    private <R extends Record> RecordMaker<R> read(Class<R> type, List<Rule> found) {
-        Arrays.stream(type.getAnnotationsByType(ExactlyOneOf.class))
-                .forEach(group -> found.add(new Rule(Rule.Kind.EXACTLY_ONE, List.of(group.value()), group.beside())));
-        Arrays.stream(type.getAnnotationsByType(AtMostOneOf.class))
-                .forEach(group -> found.add(new Rule(Rule.Kind.AT_MOST_ONE, List.of(group.value()))));
-        Arrays.stream(type.getAnnotationsByType(Together.class))
-                .forEach(pair -> found.add(new Rule(Rule.Kind.TOGETHER, List.of(pair.given(), pair.needs()))));
-        List<MethodHandle> parts = new ArrayList<>();
-        for (RecordComponent component : type.getRecordComponents()) {
-            parts.add(component.isAnnotationPresent(Flat.class) ? nested(component, found) : leaf(component));
-        }
-        return new RecordMaker<>(type, parts);
-    }
-
-    private MethodHandle nested(RecordComponent component, List<Rule> found) {
-        return read(component.getType().asSubclass(Record.class), found).handle();
-    }
-
-    private MethodHandle leaf(RecordComponent component) {
-        int index = inputs.size();
-        inputs.add(InputReader.read(component, index));
-        return RecordMaker.value(index);
     }
 }

@@ -56,6 +56,10 @@ final class Wording {
                 .near(Optional.of(known));
     }
 
+    static Fault notAnObject(String group) {
+        return new Fault(group, FaultCode.NOT_ALLOWED, group + " must be a JSON object that holds its inputs.");
+    }
+
     static Fault decimalPoint(String name, String text) {
         return new Fault(
                 name,

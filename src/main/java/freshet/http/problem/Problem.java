@@ -62,8 +62,11 @@ public record Problem(ProblemType type, int status, String detail, List<Fault> f
         List<String> pointers = holder == null
                 ? List.of()
                 : faults.stream()
-                        .map(fault ->
-                                holder + "/" + fault.field().replace("~", "~0").replace("/", "~1"))
+                        .map(fault -> holder + "/"
+                                + fault.field()
+                                        .replace("~", "~0")
+                                        .replace("/", "~1")
+                                        .replace('.', '/'))
                         .toList();
         return new Problem(type, type.status(), detail, faults, pointers);
     }

@@ -1,0 +1,121 @@
+package freshet.carbonate.web;
+
+import freshet.ammonia.AmmoniaSpeciation;
+import freshet.ammonia.Water;
+import freshet.answer.Answer;
+import freshet.answer.Notice;
+import freshet.carbonate.AlkalinityDose;
+import freshet.carbonate.CarbonateState;
+import freshet.carbonate.CarbonateSystem;
+import freshet.quantity.Sample;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+
+/** Puts together the answer on a dose. */
+final class DoseAnswer {
+
+    private final CarbonateDoseRequest request;
+    private final Sample sample;
+    private final DosePlan plan;
+
+    private DoseAnswer(CarbonateDoseRequest request) {
+        this.request = request;
+        sample = request.sample();
+        plan = new DosePlan(request);
+    }
+
+    static Answer<CarbonateDoseResponse> to(CarbonateDoseRequest request) {
+        return new DoseAnswer(request).answer();
+    }
+
+    private Answer<CarbonateDoseResponse> answer() {
+        double dose = plan.dose();
+        boolean limestone = request.chemical().limestone();
+        OptionalDouble closedPh = limestone
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(plan.closed(dose).ph());
+        double dissolved = plan.dissolved(dose);
+        CarbonateState settled = plan.settled(dissolved);
+        double doseG = plan.grams(dose);
+        double stepG = plan.grams(plan.step(dose));
+        Double solution = request.solutionGPerL();
+        CarbonateDoseResponse response = new CarbonateDoseResponse(
+                stepG == 0 ? 0 : (int) Math.min(Integer.MAX_VALUE, Math.ceil(doseG / stepG * (1 - 1e-12))),
+                stepG,
+                AlkalinityDose.hoursBetweenSteps(request.phRiseLimit()),
+                doseG,
+                solution == null ? OptionalDouble.empty() : OptionalDouble.of(doseG / solution),
+                sample.ph(),
+                closedPh,
+                settled.ph(),
+                plan.alkalinityMgPerL(dissolved),
+                nh3(OptionalDouble.of(sample.ph())),
+                worse(nh3(closedPh), nh3(OptionalDouble.of(settled.ph()))),
+                nh3(OptionalDouble.of(settled.ph())));
+        return new Answer<>(
+                response,
+                AlkalinityDose.METHOD,
+                CarbonateSystem.validity(sample.temperatureC(), sample.salinity()),
+                notices(response, dose));
+    }
+
+    private OptionalDouble nh3(OptionalDouble ph) {
+        Double tan = request.tanMgPerL();
+        return tan == null || ph.isEmpty()
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(AmmoniaSpeciation.nh3NMgPerL(
+                        tan, new Water(ph.getAsDouble(), sample.temperatureC(), sample.salinity(), sample.scale())));
+    }
+
+    private static OptionalDouble worse(OptionalDouble closed, OptionalDouble settled) {
+        return closed.isEmpty() ? closed : OptionalDouble.of(Math.max(closed.getAsDouble(), settled.orElse(0)));
+    }
+
+    private List<Notice> notices(CarbonateDoseResponse response, double dose) {
+        List<Notice> notices = new ArrayList<>();
+        if (request.chemical().caustic()) {
+            notices.add(new Notice(
+                    "caustic-protect-people",
+                    "chemical",
+                    "Goggles, gloves; the solid into water, never water onto it; never with acid or hypochlorite in a line."
+                            + " Bicarbonate is milder."));
+        }
+        if (response.steps() > 1) {
+            notices.add(
+                    new Notice(
+                            "dose-in-steps",
+                            "steps",
+                            "Never the whole dose at once: between steps let carbon dioxide recover, and measure pH and ammonia."));
+        }
+        notices.addAll(calciteNotices(dose));
+        notices.addAll(WaterNotices.of(sample.salinity(), sample.phScale(), request.alkalinityMgPerLAsCaco3()));
+        return notices;
+    }
+
+    private List<Notice> calciteNotices(double dose) {
+        List<Notice> notices = new ArrayList<>(2);
+        if (request.chemical().limestone()) {
+            notices.add(
+                    new Notice(
+                            "dissolves-slowly",
+                            "alkalinity_after_mg_per_l_as_caco3",
+                            "The most that can dissolve, over days and weeks; pH and NH3 settled are those of that upper bound."));
+        }
+        if (request.chemical().calcium() && request.calciumMgPerL() == null) {
+            notices.add(new Notice(
+                    "precipitation-not-checked",
+                    "calcium_mg_per_l",
+                    "Calcium was not given, so saturation with calcite could not be judged."));
+        }
+        if (!request.chemical().limestone()
+                && plan.calcite(plan.closed(dose), dose).orElse(-1) > 0) {
+            notices.add(
+                    new Notice(
+                            "calcite-may-precipitate",
+                            "dose_g",
+                            "The whole dose at once passes saturation with calcite: milky water, and alkalinity is lost again."));
+        }
+        return notices;
+    }
+}

@@ -1,0 +1,157 @@
+package freshet.dilution.web;
+
+import freshet.acidity.PhScale;
+import freshet.answer.Notice;
+import freshet.dilution.Blend;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
+
+/** What the reader of a blend must know, most serious first. */
+final class BlendNotices {
+
+    private static final double CHLORINE_MG_PER_L = 0.003;
+    private static final double HARD_PH_LIMIT = 0.5;
+    private static final double HARD_TEMPERATURE_LIMIT_C = 5;
+    private static final double FRESH = 0.5;
+    private static final double HARD_WATER_MG_PER_L = 100;
+    private static final double ROUNDING = 1e-9;
+
+    private final DilutionBlendRequest request;
+    private final Blend blend;
+    private final Blend.Mixture mixture;
+    private final DilutionBlendResponse response;
+    private final List<Notice> notices = new ArrayList<>();
+
+    BlendNotices(DilutionBlendRequest request, Blend blend, Blend.Mixture mixture, DilutionBlendResponse response) {
+        this.request = request;
+        this.blend = blend;
+        this.mixture = mixture;
+        this.response = response;
+    }
+
+    List<Notice> all() {
+        chlorine();
+        ammonia();
+        shocks();
+        notMixed();
+        salt();
+        return notices;
+    }
+
+    private void chlorine() {
+        if (request.source().allChlorineMgPerL() > CHLORINE_MG_PER_L) {
+            note(
+                    "chlorine-in-source",
+                    "source.chlorine_mg_per_l_as_cl2",
+                    "Kills fish: dechlorinate the source water before it is mixed, and measure to zero.");
+        }
+        if (WaterSample.zeroIfNone(request.source().chloramineMgPerLAsCl2()) > 0
+                || WaterSample.zeroIfNone(request.tank().chloramineMgPerLAsCl2()) > 0) {
+            note(
+                    "chloramine-frees-ammonia",
+                    "source.chloramine_mg_per_l_as_cl2",
+                    "Dechlorination of chloramine sets ammonia free; it is counted in tan_mg_per_l where that is known.");
+        }
+    }
+
+    private void ammonia() {
+        if (response.nh3NBeforeMgPerL().isEmpty()) {
+            return;
+        }
+        double before = response.nh3NBeforeMgPerL().getAsDouble() * (1 + ROUNDING);
+        boolean atOnce = response.nh3NMgPerL().orElse(0) > before;
+        boolean later = response.nh3NSettledMgPerL().orElse(0) > before;
+        boolean tanFalls = mixture.water().tanMgPerL() < blend.tank().tanMgPerL();
+        if (atOnce && tanFalls) {
+            note(
+                    "nh3-rises-although-tan-falls",
+                    "nh3_n_mg_per_l",
+                    "Total ammonia falls, toxic ammonia rises with pH: exchange less, slower, or water of lower pH.");
+        } else if (atOnce) {
+            note("nh3-rises", "nh3_n_mg_per_l", "The mixture holds more toxic ammonia than the tank does now.");
+        }
+        if (later && !atOnce) {
+            note(
+                    "nh3-rises-after-aeration",
+                    "nh3_n_settled_mg_per_l",
+                    "Toxic ammonia rises hours later, when carbon dioxide has gone and pH with it: exchange less.");
+        }
+    }
+
+    private void shocks() {
+        double ph = Math.abs(response.phChange());
+        if (ph > request.phChangeLimit()) {
+            note(
+                    "ph-shock",
+                    "ph_change",
+                    "pH changes by more than ph_change_limit"
+                            + (ph > HARD_PH_LIMIT ? ", and beyond the hard limit of 0.5" : "")
+                            + ": exchange in steps.");
+        }
+        double degrees = Math.abs(response.temperatureChangeC());
+        if (degrees > request.temperatureChangeLimitC()) {
+            note(
+                    "thermal-shock",
+                    "temperature_change_c",
+                    "Temperature changes by more than temperature_change_limit_c"
+                            + (degrees > HARD_TEMPERATURE_LIMIT_C ? ", and beyond the hard limit of 5 °C" : "")
+                            + ": temper the water or go slower.");
+        }
+    }
+
+    private void notMixed() {
+        List<String> missing = new ArrayList<>();
+        if (response.tanMgPerL().isEmpty()) {
+            missing.add("tan_mg_per_l");
+        }
+        oneOnly("no2_n_mg_per_l", WaterSample::no2NMgPerL, missing);
+        oneOnly("no3_n_mg_per_l", WaterSample::no3NMgPerL, missing);
+        oneOnly("calcium_mg_per_l", WaterSample::calciumMgPerL, missing);
+        if (!missing.isEmpty()) {
+            note(
+                    "not-mixed",
+                    missing.get(0),
+                    "Not given for both waters, so not mixed"
+                            + (response.tanMgPerL().isEmpty() ? ", and NH3 not judged" : "") + ": "
+                            + String.join(", ", missing) + ".");
+        }
+    }
+
+    private void oneOnly(String name, Function<WaterSample, @Nullable Double> quantity, List<String> missing) {
+        if ((quantity.apply(request.tank()) == null) != (quantity.apply(request.source()) == null)) {
+            missing.add(name);
+        }
+    }
+
+    private void salt() {
+        double most = Math.max(request.tank().salinity(), request.source().salinity());
+        if (most > FRESH && request.phScale() == null) {
+            note(
+                    "ph-scale-assumed-nbs",
+                    "ph_scale",
+                    "Every ph was taken as a reading of a probe on NBS or IUPAC buffers.");
+        }
+        if (most > FRESH && request.scale() == PhScale.NBS) {
+            note(
+                    "nbs-in-saline-water",
+                    "ph",
+                    "In brackish water such a probe is uncertain by 0.1 in pH; NH3 from it reads high.");
+        }
+        if (hard(request.tank()) || hard(request.source())) {
+            note(
+                    "ionic-strength-unknown",
+                    "salinity",
+                    "Hard water at salinity 0 is solved as infinitely dilute: pH may be off by 0.02, NH3 by 4 %.");
+        }
+    }
+
+    private static boolean hard(WaterSample sample) {
+        return sample.salinity() < FRESH && sample.alkalinityMgPerLAsCaco3() > HARD_WATER_MG_PER_L;
+    }
+
+    private void note(String code, String field, String detail) {
+        notices.add(new Notice(code, field, detail));
+    }
+}

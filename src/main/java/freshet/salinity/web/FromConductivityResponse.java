@@ -1,0 +1,9 @@
+package freshet.salinity.web;
+
+import freshet.quantity.Reported;
+
+record FromConductivityResponse(
+        @Reported("Practical salinity, PSS-78") double salinity,
+
+        @Reported("Density at the temperature of the water and one atmosphere")
+        double densityKgPerM3) {}
