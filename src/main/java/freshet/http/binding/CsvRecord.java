@@ -2,13 +2,12 @@ package freshet.http.binding;
 
 import de.siegmar.fastcsv.reader.CsvCallbackHandler;
 import de.siegmar.fastcsv.reader.RecordType;
-import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
 
 /** The cells of one line of a table; the same object for every line, since there may be millions of them. */
 final class CsvRecord extends CsvCallbackHandler<CsvRecord> {
 
-    private byte[] bytes = new byte[512];
+    private char[] chars = new char[512];
     private int[] ends = new int[32];
     private boolean[] quoted = new boolean[32];
     private int count;
@@ -39,11 +38,12 @@ final class CsvRecord extends CsvCallbackHandler<CsvRecord> {
     /** A cell, each byte as one character. */
     String text(int cell) {
         int start = start(cell);
-        return new String(bytes, start, ends[cell] - start, StandardCharsets.ISO_8859_1);
+        return new String(chars, start, ends[cell] - start);
     }
 
-    byte[] bytes() {
-        return bytes;
+    /** What holds the cells, one after the other. */
+    char[] chars() {
+        return chars;
     }
 
     int start(int cell) {
@@ -82,12 +82,10 @@ final class CsvRecord extends CsvCallbackHandler<CsvRecord> {
         tooLong |= start + count + length > Rows.LONGEST_ROW;
         end |= length > 0 && buffer[offset + length - 1] == CsvText.END;
         int kept = tooLong ? 0 : length;
-        if (start + kept > bytes.length) {
-            bytes = Arrays.copyOf(bytes, Math.max(2 * bytes.length, start + kept));
+        if (start + kept > chars.length) {
+            chars = Arrays.copyOf(chars, Math.max(2 * chars.length, start + kept));
         }
-        for (int i = 0; i < kept; i++) {
-            bytes[start + i] = (byte) buffer[offset + i];
-        }
+        System.arraycopy(buffer, offset, chars, start, kept);
         if (count == ends.length) {
             ends = Arrays.copyOf(ends, 2 * count);
             quoted = Arrays.copyOf(quoted, 2 * count);

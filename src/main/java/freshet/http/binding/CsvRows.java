@@ -106,7 +106,8 @@ public final class CsvRows<T extends Record> implements Rows<T> {
         Draft<T> draft = constants.row();
         for (int i = 0; i < entries.length; i++) {
             Shape.Entry entry = entries[i];
-            if (entry != null) {
+            int start = line.start(i);
+            if (entry != null && (decimalComma || !draft.plain(entry, line.chars(), start, line.end(i) - start))) {
                 take(entry, line.text(i), draft);
             }
         }
@@ -131,9 +132,9 @@ public final class CsvRows<T extends Record> implements Rows<T> {
         int start = line.start(column);
         int end = line.end(column);
         if (line.quoted(column)) {
-            CsvCells.quoted(line.bytes(), start, end, out);
+            CsvCells.quoted(line.chars(), start, end, out);
         } else {
-            out.put(line.bytes(), start, end - start);
+            out.put(line.chars(), start, end);
         }
     }
 

@@ -113,6 +113,22 @@ final class Draft<T extends Record> {
         return found;
     }
 
+    /** Takes a number that is spelled plainly and within bounds, which most are; false if this is none, and nothing taken. */
+    boolean plain(Shape.Entry entry, char[] text, int offset, int length) {
+        Input input = entry.input();
+        if (input.kind() != Input.Kind.NUMBER) {
+            return false;
+        }
+        double value = entry.spelling().canonical(NumberText.plain(text, offset, length));
+        if (!(value >= input.minimum() && value <= input.maximum())) {
+            return false;
+        }
+        if (claim(entry)) {
+            values[input.index()] = value;
+        }
+        return true;
+    }
+
     /** Takes a cell of a table; an empty one leaves out an input that may be left out and has no default. */
     void cell(Shape.Entry entry, String text) {
         if (!text.isEmpty()) {

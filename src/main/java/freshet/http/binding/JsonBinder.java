@@ -36,22 +36,30 @@ final class JsonBinder {
 
     /** Reads a body that is one object. */
     static void read(byte[] body, Draft<?> inputs) {
-        object(body, 0, body.length, inputs, null);
+        try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), body)) {
+            line(parser, inputs, null);
+            if (parser.nextToken() != null) {
+                throw notOneObject(null);
+            }
+        } catch (JacksonException malformed) {
+            throw UnreadableBody.at(malformed, whole(null));
+        }
     }
 
-    /** Reads a text that is one object. */
-    static void object(byte[] text, int offset, int length, Draft<?> inputs, @Nullable Tag tag) {
-        try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), text, offset, length)) {
+    /** Reads the one object of a line of a series, which has a tag, or of a body, which has none. */
+    static void line(JsonParser parser, Draft<?> inputs, @Nullable Tag tag) {
+        try {
             if (parser.nextToken() != JsonToken.START_OBJECT) {
                 throw new UnreadableBody("The " + whole(tag) + " must be one JSON object that holds the inputs.");
             }
             members(parser, "", inputs, tag);
-            if (parser.nextToken() != null) {
-                throw new UnreadableBody("The " + whole(tag) + " must end after one JSON object.");
-            }
         } catch (JacksonException malformed) {
             throw UnreadableBody.at(malformed, whole(tag));
         }
+    }
+
+    static UnreadableBody notOneObject(@Nullable Tag tag) {
+        return new UnreadableBody("The " + whole(tag) + " must end after one JSON object.");
     }
 
     /** Reads the rest of an object whose brace was read; its inputs have names that begin with {@code prefix}. */
@@ -101,7 +109,11 @@ final class JsonBinder {
         if (token == JsonToken.VALUE_NULL) {
             inputs.nothing(entry);
         } else if (fits) {
-            inputs.text(entry, parser.getString());
+            if (!token.isNumeric()
+                    || !inputs.plain(
+                            entry, parser.getStringCharacters(), parser.getStringOffset(), parser.getStringLength())) {
+                inputs.text(entry, parser.getString());
+            }
         } else {
             String text = token.isStructStart() ? token.asString() + "…" : parser.getString();
             inputs.misfit(entry, text);

@@ -1,7 +1,9 @@
 package freshet.http.binding;
 
+import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.InputStream;
+import tools.jackson.core.JsonParser;
 
 /** The lines of a body that are not blank; of one that is longer than a row may be only that it is. */
 final class Lines {
@@ -19,16 +21,31 @@ final class Lines {
         this.in = in;
     }
 
-    byte[] bytes() {
-        return buffer;
+    /** What a parser reads: the line, and at its end the end. */
+    InputStream asInput() {
+        return new InputStream() {
+            @Override
+            public int read() {
+                return start < end ? buffer[start++] & 0xFF : -1;
+            }
+
+            @Override
+            public int read(byte[] target, int offset, int most) {
+                int length = Math.min(most, end - start);
+                System.arraycopy(buffer, start, target, offset, length);
+                start += length;
+                return length == 0 ? -1 : length;
+            }
+        };
     }
 
-    int start() {
-        return start;
-    }
-
-    int length() {
-        return end - start;
+    /** Whether nothing but blanks follows in the line after what {@code parser} has read of it. */
+    boolean restIsBlank(JsonParser parser) {
+        int from = start;
+        ByteArrayOutputStream read = new ByteArrayOutputStream(0);
+        parser.releaseBuffered(read);
+        start = end;
+        return isBlank(buffer, from, end) && isBlank(read.toByteArray(), 0, read.size());
     }
 
     boolean tooLong() {
@@ -41,7 +58,7 @@ final class Lines {
             if (!line()) {
                 return false;
             }
-        } while (!tooLong && isBlank());
+        } while (!tooLong && isBlank(buffer, start, end));
         return true;
     }
 
@@ -56,7 +73,7 @@ final class Lines {
                 }
             }
             if (ended) {
-                return upTo(filled, filled) && (length() > 0 || tooLong);
+                return upTo(filled, filled) && (end > start || tooLong);
             }
             scanned = fill();
         }
@@ -65,7 +82,7 @@ final class Lines {
     private boolean upTo(int last, int following) {
         end = last;
         next = following;
-        tooLong |= length() > Rows.LONGEST_ROW;
+        tooLong |= end - start > Rows.LONGEST_ROW;
         return true;
     }
 
@@ -85,9 +102,9 @@ final class Lines {
         return from;
     }
 
-    private boolean isBlank() {
-        for (int i = start; i < end; i++) {
-            if (buffer[i] != ' ' && buffer[i] != '\t' && buffer[i] != '\r') {
+    private static boolean isBlank(byte[] bytes, int from, int to) {
+        for (int i = from; i < to; i++) {
+            if (bytes[i] != ' ' && bytes[i] != '\t' && bytes[i] != '\r') {
                 return false;
             }
         }

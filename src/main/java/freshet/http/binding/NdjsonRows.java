@@ -8,12 +8,14 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
+import tools.jackson.core.JsonParser;
 
 /** JSON objects, one on each line. */
 public final class NdjsonRows<T extends Record> implements Rows<T> {
 
     private final Draft<T> constants;
     private final Lines lines;
+    private @Nullable JsonParser parser;
     private final Tag tag = new Tag();
     private Draft<T> draft;
     private boolean first = true;
@@ -55,10 +57,14 @@ public final class NdjsonRows<T extends Record> implements Rows<T> {
         return true;
     }
 
+    /** One parser reads line after line, since a new one costs as much as a row; after a fault another takes its place. */
     private @Nullable RuntimeException read() {
+        JsonParser current = parser == null ? JsonBinder.parser(lines.asInput()) : parser;
+        parser = null;
         try {
-            JsonBinder.object(lines.bytes(), lines.start(), lines.length(), draft, tag);
-            return null;
+            JsonBinder.line(current, draft, tag);
+            parser = current;
+            return lines.restIsBlank(current) ? null : JsonBinder.notOneObject(tag);
         } catch (UnreadableBody malformed) {
             return malformed;
         }

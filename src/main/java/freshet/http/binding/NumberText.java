@@ -20,7 +20,7 @@ final class NumberText {
 
     /** The double nearest to the number; NaN if the text is none. */
     static double read(String text) {
-        double plain = plain(text);
+        double plain = plain(text.toCharArray(), 0, text.length());
         return !Double.isNaN(plain) || !isNumber(text) ? plain : Double.parseDouble(text);
     }
 
@@ -28,33 +28,26 @@ final class NumberText {
      * The value of a decimal that is short enough for its digits and its power of ten to be exact doubles, so that their
      * quotient is the nearest double (Clinger 1990); NaN for every other text.
      */
-    private static double plain(String text) {
-        int length = text.length();
-        int start = length > 0 && text.charAt(0) == '-' ? 1 : 0;
-        if (length == start || length > SHORT + start || (text.charAt(start) == '0' && !isFraction(text, start + 1))) {
+    static double plain(char[] text, int offset, int length) {
+        int end = offset + length;
+        int start = length > 0 && text[offset] == '-' ? offset + 1 : offset;
+        if (start == end || end - start > SHORT || text[start] == '0' && start + 1 < end && text[start + 1] != '.') {
             return Double.NaN;
         }
         long digits = 0;
-        int point = -1;
-        for (int i = start; i < length; i++) {
-            int digit = text.charAt(i) - '0';
+        int point = end;
+        for (int i = start; i < end; i++) {
+            int digit = text[i] - '0';
             if (digit >= 0 && digit <= 9) {
                 digits = 10 * digits + digit;
-            } else if (digit == '.' - '0' && point < 0 && i > start) {
-                point = i;
+            } else if (digit == '.' - '0' && point == end && i > start && i + 1 < end) {
+                point = i + 1;
             } else {
                 return Double.NaN;
             }
         }
-        if (point == length - 1) {
-            return Double.NaN;
-        }
-        double value = point < 0 ? digits : digits / POWERS[length - 1 - point];
-        return start == 0 ? value : -value;
-    }
-
-    private static boolean isFraction(String text, int from) {
-        return from == text.length() || text.charAt(from) == '.';
+        double value = digits / POWERS[end - point];
+        return start == offset ? value : -value;
     }
 
     /** Whether the text is a number in the grammar of RFC 8259 and not too long. */

@@ -53,6 +53,14 @@ public final class Bytes {
         length += bytes.length;
     }
 
+    /** Appends a part of {@code chars}, each of them one byte. */
+    public void put(char[] chars, int start, int end) {
+        reserve(end - start);
+        for (int i = start; i < end; i++) {
+            array[length++] = (byte) chars[i];
+        }
+    }
+
     /** Appends a part of {@code bytes}. */
     public void put(byte[] bytes, int offset, int count) {
         reserve(count);

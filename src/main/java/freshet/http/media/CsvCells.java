@@ -11,20 +11,21 @@ public final class CsvCells {
     public static void put(String text, char separator, Bytes out) {
         byte[] bytes = text.getBytes(StandardCharsets.UTF_8);
         if (needsQuotes(bytes, separator)) {
-            quoted(bytes, 0, bytes.length, out);
+            char[] chars = new String(bytes, StandardCharsets.ISO_8859_1).toCharArray();
+            quoted(chars, 0, chars.length, out);
         } else {
             out.put(bytes);
         }
     }
 
-    /** Appends a part of {@code bytes} as a cell in quotes. */
-    public static void quoted(byte[] bytes, int start, int end, Bytes out) {
+    /** Appends a part of {@code chars}, each of them one byte, as a cell in quotes. */
+    public static void quoted(char[] chars, int start, int end, Bytes out) {
         out.put('"');
         for (int i = start; i < end; i++) {
-            if (bytes[i] == '"') {
+            if (chars[i] == '"') {
                 out.put('"');
             }
-            out.put((char) bytes[i]);
+            out.put(chars[i]);
         }
         out.put('"');
     }
