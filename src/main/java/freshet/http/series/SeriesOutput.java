@@ -9,12 +9,10 @@ import java.util.List;
 /** The answers of a series on their way out: held to the end, or sent as they come. */
 final class SeriesOutput {
 
-    private static final int MUCH = 32 * 1024;
-
     private final HttpServletResponse response;
     private final boolean streams;
     private final List<Bytes> held = new ArrayList<>();
-    private Bytes bytes = new Bytes(MUCH + 4096);
+    private Bytes bytes = Parts.take();
 
     SeriesOutput(HttpServletResponse response, boolean streams) {
         this.response = response;
@@ -28,12 +26,12 @@ final class SeriesOutput {
 
     /** Makes room when there is much. */
     void rowEnds() throws IOException {
-        if (bytes.length() >= MUCH) {
+        if (bytes.length() >= Parts.FULL) {
             if (streams) {
                 send();
             } else {
                 held.add(bytes);
-                bytes = new Bytes(MUCH + 4096);
+                bytes = Parts.take();
             }
         }
     }
@@ -55,6 +53,7 @@ final class SeriesOutput {
         for (Bytes part : held) {
             write(part);
         }
+        held.forEach(Parts::giveBack);
     }
 
     private void write(Bytes part) throws IOException {
