@@ -3,6 +3,7 @@ package freshet.catalogue;
 import freshet.acidity.Dickson1990;
 import freshet.acidity.DicksonRiley1979;
 import freshet.ammonia.AmmoniaMethod;
+import freshet.ammonia.LimitTable;
 import freshet.ammonia.Nh3Guideline;
 import freshet.carbonate.AlkalinityDose;
 import freshet.carbonate.CarbonateSystem;
@@ -16,6 +17,8 @@ import freshet.carbonate.Takahashi1982;
 import freshet.carbonate.WatersMilleroWoosley2014;
 import freshet.dilution.Blend;
 import freshet.dilution.DilutionMode;
+import freshet.farm.AlarmProfile;
+import freshet.farm.GuardBand;
 import freshet.method.Method;
 import freshet.nitrate.MixedTank;
 import freshet.nitrate.NitrateFromFeed;
@@ -43,7 +46,8 @@ final class Methods {
                     Stream.of(CarbonateSystem.METHOD, WatersMilleroWoosley2014.METHOD, Millero1995.METHOD),
                     Stream.of(Dickson1990Borate.METHOD, PlummerBusenberg1982.METHOD, Mucci1983.METHOD),
                     Stream.of(ProbeActivity.METHOD, Davies1962.METHOD, Takahashi1982.METHOD),
-                    Stream.of(AlkalinityDose.METHOD, Blend.METHOD),
+                    Stream.of(AlkalinityDose.METHOD, Blend.METHOD, LimitTable.METHOD, GuardBand.METHOD),
+                    of(AlarmProfile.values(), AlarmProfile::method),
                     Stream.of(BensonKrause1984.METHOD, StandardAtmosphere1976.METHOD),
                     Stream.of(PracticalSalinity1978.METHOD, MilleroPoisson1981.METHOD),
                     of(AmmoniaMethod.values(), choice -> choice.dissociation().method()),

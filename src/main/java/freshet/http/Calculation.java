@@ -1,10 +1,15 @@
 package freshet.http;
 
 import freshet.answer.Answer;
+import freshet.http.binding.Controls.Format;
 import freshet.http.binding.Shape;
+import freshet.http.media.Bytes;
+import freshet.http.media.Negotiation;
 import freshet.http.media.Table;
 import freshet.method.Method;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.function.Function;
 
 /**
@@ -22,6 +27,8 @@ import java.util.function.Function;
  * @param function the calculation; throws {@link freshet.answer.Refusal} where it cannot answer
  * @param methods every method an answer may rest on
  * @param example a query that shows the main use
+ * @param forms media that the calculation writes itself
+ * @param readOnly whether it is asked by GET only
  */
 public record Calculation<I extends Record, O extends Record>(
         String path,
@@ -32,33 +39,62 @@ public record Calculation<I extends Record, O extends Record>(
         Class<O> responseType,
         Function<I, Answer<O>> function,
         List<Method> methods,
-        String example) {
+        String example,
+        Map<Format, Function<Answer<O>, Bytes>> forms,
+        boolean readOnly) {
 
     /** Copies the list of methods. */
     public Calculation {
         methods = List.copyOf(methods);
+        forms = Map.copyOf(forms);
     }
 
     /** Starts a declaration. */
     public static <I extends Record, O extends Record> Calculation<I, O> of(
             String path, Class<I> requestType, Class<O> responseType, Function<I, Answer<O>> function) {
         return new Calculation<>(
-                path, "", "", Shape.of(requestType), Table.of(responseType), responseType, function, List.of(), "");
+                path,
+                "",
+                "",
+                Shape.of(requestType),
+                Table.of(responseType),
+                responseType,
+                function,
+                List.of(),
+                "",
+                Map.of(),
+                false);
     }
 
     /** The same with the texts that documents show. */
     public Calculation<I, O> describedAs(String oneLine, String caution) {
-        return new Calculation<>(path, oneLine, caution, inputs, outputs, responseType, function, methods, example);
+        return new Calculation<>(
+                path, oneLine, caution, inputs, outputs, responseType, function, methods, example, forms, readOnly);
     }
 
     /** The same with the methods that an answer may rest on. */
     public Calculation<I, O> using(List<Method> used) {
-        return new Calculation<>(path, summary, cautions, inputs, outputs, responseType, function, used, example);
+        return new Calculation<>(
+                path, summary, cautions, inputs, outputs, responseType, function, used, example, forms, readOnly);
+    }
+
+    /** The same, asked by GET only and written by itself in some media. */
+    public Calculation<I, O> readOnly(Map<Format, Function<Answer<O>, Bytes>> own) {
+        return new Calculation<>(
+                path, summary, cautions, inputs, outputs, responseType, function, methods, example, own, true);
+    }
+
+    /** The media that an answer can be given in, the preferred one first. */
+    public List<Format> formats() {
+        List<Format> formats = new ArrayList<>(Negotiation.formats(outputs));
+        forms.keySet().stream().filter(form -> !formats.contains(form)).forEach(formats::add);
+        return formats;
     }
 
     /** The same with a query that shows the main use. */
     public Calculation<I, O> shownBy(String query) {
-        return new Calculation<>(path, summary, cautions, inputs, outputs, responseType, function, methods, query);
+        return new Calculation<>(
+                path, summary, cautions, inputs, outputs, responseType, function, methods, query, forms, readOnly);
     }
 
     /**

@@ -33,7 +33,12 @@ final class CalculationServlet extends ProblemServlet {
                 }
                 endpoint.get(request, response);
             }
-            case "POST" -> endpoint.post(request, response);
+            case "POST" -> {
+                if (!endpoint.takesBody()) {
+                    throw methodNotAllowed("This is asked by GET with a query.");
+                }
+                endpoint.post(request, response);
+            }
             default -> throw methodNotAllowed("A calculation is asked by GET with a query or by POST with JSON.");
         }
     }
@@ -41,7 +46,9 @@ final class CalculationServlet extends ProblemServlet {
     @Override
     String allowed(HttpServletRequest request) {
         Endpoint<?, ?> endpoint = endpoints.get(request.getServletPath());
-        return endpoint == null || endpoint.takesQuery() ? "GET, HEAD, POST, OPTIONS" : "POST, OPTIONS";
+        boolean reads = endpoint == null || endpoint.takesQuery();
+        boolean takes = endpoint == null || endpoint.takesBody();
+        return (reads ? "GET, HEAD, " : "") + (takes ? "POST, " : "") + "OPTIONS";
     }
 
     @Override

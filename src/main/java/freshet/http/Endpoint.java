@@ -17,6 +17,7 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.function.Function;
 
 /** One calculation as HTTP reaches it: GET with a query, POST with a JSON object. */
 final class Endpoint<I extends Record, O extends Record> {
@@ -30,14 +31,21 @@ final class Endpoint<I extends Record, O extends Record> {
 
     Endpoint(Calculation<I, O> calculation, String release) {
         this.calculation = calculation;
-        formats = Negotiation.formats(calculation.outputs());
-        formats.forEach(format -> writers.put(format, AnswerWriter.of(format, calculation.outputs())));
+        formats = calculation.formats();
+        formats.stream()
+                .filter(format -> !calculation.forms().containsKey(format))
+                .forEach(format -> writers.put(format, AnswerWriter.of(format, calculation.outputs())));
         tagSeed = EntityTag.seed(calculation.path(), calculation.methods(), release);
     }
 
     /** Whether a query can hold the inputs. */
     boolean takesQuery() {
         return calculation.inputs().flat();
+    }
+
+    /** Whether a body is taken. */
+    boolean takesBody() {
+        return !calculation.readOnly();
     }
 
     void get(HttpServletRequest request, HttpServletResponse response) throws IOException {
@@ -72,10 +80,13 @@ final class Endpoint<I extends Record, O extends Record> {
     }
 
     private Bytes compute(Request<I> read, Format format, HttpServletResponse response) {
-        AnswerWriter writer = Objects.requireNonNull(writers.get(format));
         boolean compact = read.controls().compact();
         Answer<O> answer = calculation.answer(read.inputs(), read.controls().strict());
-        return link(answer.method(), compact, response, writer.write(answer, compact));
+        Function<Answer<O>, Bytes> own = calculation.forms().get(format);
+        Bytes body = own != null
+                ? own.apply(answer)
+                : Objects.requireNonNull(writers.get(format)).write(answer, compact);
+        return link(answer.method(), compact, response, body);
     }
 
     private static Bytes link(Method method, boolean compact, HttpServletResponse response, Bytes body) {

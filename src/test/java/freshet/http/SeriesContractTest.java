@@ -166,7 +166,7 @@ class SeriesContractTest {
     private static String row(Calculation<?, ?> calculation) {
         List<String> members = new ArrayList<>();
         inputs(calculation).forEach((name, value) -> {
-            boolean quoted = calculation.inputs().input(name).kind() == Input.Kind.CHOICE;
+            boolean quoted = calculation.inputs().input(name).enumerated();
             members.add("\"" + name + "\":" + (quoted ? "\"" + value + "\"" : value));
         });
         return members.stream().collect(Collectors.joining(",", "{", "}"));

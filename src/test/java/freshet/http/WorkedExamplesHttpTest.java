@@ -35,7 +35,7 @@ class WorkedExamplesHttpTest {
 
     @Test
     void noExampleIsLost() {
-        assertThat(examples()).hasSize(34);
+        assertThat(examples()).hasSize(36);
     }
 
     private void check(JsonNode example) {

@@ -2,12 +2,15 @@ package freshet.ammonia.web;
 
 import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.AmmoniaSpeciation;
+import freshet.ammonia.LimitTable;
 import freshet.ammonia.Nh3Guideline;
 import freshet.answer.Answer;
 import freshet.http.Calculation;
+import freshet.http.binding.Controls.Format;
 import freshet.method.Method;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
 import java.util.stream.Stream;
 import org.springframework.context.annotation.Bean;
 import org.springframework.context.annotation.Configuration;
@@ -48,6 +51,27 @@ class AmmoniaCalculations {
                                 Arrays.stream(Nh3Guideline.values()).map(Nh3Guideline::method))
                         .toList())
                 .shownBy("nh3_n_limit_mg_per_l=0.02&ph=7.4&temperature_c=26&tan_mg_per_l=1.2");
+    }
+
+    @Bean
+    Calculation<AmmoniaLimitTableRequest, AmmoniaLimitTableResponse> ammoniaLimitTable() {
+        return Calculation.of(
+                        "ammonia/limit-table",
+                        AmmoniaLimitTableRequest.class,
+                        AmmoniaLimitTableResponse.class,
+                        LimitTableAnswer::to)
+                .describedAs(
+                        "Limits of total ammonia by pH and temperature for days without a network, safe under interpolation",
+                        "A table never replaces a reading. It holds for one salinity; above the last node a lookup must give 0,"
+                                + " so that every comparison raises an alarm. Toxicity depends on species, age and"
+                                + " acclimation.")
+                .using(Stream.concat(
+                                Stream.concat(Stream.of(LimitTable.METHOD), DISSOCIATION_METHODS.stream()),
+                                Arrays.stream(Nh3Guideline.values()).map(Nh3Guideline::method))
+                        .toList())
+                .shownBy("nh3_n_limit_mg_per_l=0.02&ph_min=7&ph_max=8.5&ph_step=0.5&temperature_min_c=10"
+                        + "&temperature_max_c=30&temperature_step_c=10")
+                .readOnly(Map.of(Format.C, LimitTableHeader::of, Format.CSV, LimitTableHeader::csv));
     }
 
     private static Answer<AmmoniaSpeciationResponse> speciation(AmmoniaSpeciationRequest request) {

@@ -5,7 +5,6 @@ import freshet.http.binding.Controls;
 import freshet.http.binding.Controls.Format;
 import freshet.http.binding.Input;
 import freshet.http.binding.Spelling;
-import freshet.http.media.Negotiation;
 import io.swagger.v3.oas.models.Operation;
 import io.swagger.v3.oas.models.PathItem;
 import io.swagger.v3.oas.models.headers.Header;
@@ -26,8 +25,11 @@ final class CalculationPath {
 
     static PathItem of(Calculation<?, ?> calculation) {
         Example example = Example.of(calculation);
-        PathItem path = new PathItem().post(post(calculation, example));
-        return calculation.inputs().flat() ? path.get(get(calculation, example)) : path;
+        PathItem path = new PathItem();
+        if (calculation.inputs().flat()) {
+            path.get(get(calculation, example));
+        }
+        return calculation.readOnly() ? path : path.post(post(calculation, example));
     }
 
     private static Operation get(Calculation<?, ?> calculation, Example example) {
@@ -87,7 +89,7 @@ final class CalculationPath {
 
     private static Content content(Calculation<?, ?> calculation, MediaType json) {
         Content content = new Content();
-        for (Format format : Negotiation.formats(calculation.outputs())) {
+        for (Format format : calculation.formats()) {
             content.addMediaType(
                     format.mediaType(),
                     format == Format.JSON ? json : new MediaType().schema(Schemas.ofType("string")));

@@ -58,6 +58,7 @@ final class Schemas {
             case WHOLE -> bounded(ofType("integer"), input, spelling);
             case FLAG -> ofType("boolean");
             case CHOICE -> choice(input.allowed());
+            case LIST -> text("");
         };
         schema.setDescription(description(input, spelling));
         if (spelling.name().equals(input.name())) {
@@ -76,6 +77,8 @@ final class Schemas {
             case FLAG -> ofType("boolean");
             case TEXT -> choice(column.choices());
             case ROWS -> ofType("array");
+            case NUMBERS -> items(ofType("array"), ofType("number"));
+            case MATRIX -> items(ofType("array"), items(ofType("array"), ofType("number")));
         };
         if (column.kind() == Column.Kind.NUMBER || column.kind() == Column.Kind.WHOLE) {
             schema.addExtension("x-unit", column.unit().ucum());
@@ -88,7 +91,7 @@ final class Schemas {
         return switch (input.kind()) {
             case NUMBER, WHOLE -> new BigDecimal(text);
             case FLAG -> Boolean.valueOf(text);
-            case CHOICE -> text;
+            case CHOICE, LIST -> text;
         };
     }
 
@@ -102,6 +105,7 @@ final class Schemas {
     private static String description(Input input, Spelling spelling) {
         String unit = input.numeric() ? spelling.unit().with("").strip() : "";
         return input.meaning()
+                + (input.kind() == Input.Kind.LIST ? ": " + String.join(", ", input.allowed()) : "")
                 + (unit.isEmpty() ? "" : "; " + unit)
                 + (spelling.name().equals(input.name()) ? "" : ", instead of " + input.name());
     }

@@ -29,7 +29,9 @@ public record Controls(
         /** A table after RFC 4180. */
         CSV("text/csv"),
         /** One CBOR map (RFC 8949); flat answers only. */
-        CBOR("application/cbor");
+        CBOR("application/cbor"),
+        /** A C99 header; limit tables only. */
+        C("text/x-c");
 
         private final String mediaType;
 

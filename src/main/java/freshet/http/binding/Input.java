@@ -1,6 +1,7 @@
 package freshet.http.binding;
 
 import freshet.quantity.Unit;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -42,7 +43,9 @@ public record Input(
         /** True or false. */
         FLAG,
         /** One of an enumeration. */
-        CHOICE
+        CHOICE,
+        /** Some of an enumeration, with commas between. */
+        LIST
     }
 
     /** The canonical name. */
@@ -70,6 +73,24 @@ public record Input(
         return List.copyOf(choices.keySet());
     }
 
+    /** The enumerated values that {@code text} names; empty if it names another or none. */
+    Optional<List<Object>> list(String text) {
+        List<Object> values = new ArrayList<>();
+        for (String part : text.split(",", -1)) {
+            Object value = choices.get(part.strip());
+            if (value == null) {
+                return Optional.empty();
+            }
+            values.add(value);
+        }
+        return Optional.of(List.copyOf(values));
+    }
+
+    /** Whether it takes one or some of an enumeration, which JSON holds as a text. */
+    public boolean enumerated() {
+        return kind == Kind.CHOICE || kind == Kind.LIST;
+    }
+
     /** The value when it is not given; null if there is none. */
     @Nullable
     Object defaultValue() {
@@ -79,6 +100,7 @@ public record Input(
                     case WHOLE -> Integer.valueOf(text);
                     case FLAG -> Boolean.valueOf(text);
                     case CHOICE -> choices.get(text);
+                    case LIST -> list(text).orElseThrow();
                 })
                 .orElse(null);
     }

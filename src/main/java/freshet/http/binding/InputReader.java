@@ -11,10 +11,12 @@ import jakarta.validation.constraints.DecimalMin;
 import jakarta.validation.constraints.NotNull;
 import java.lang.annotation.Annotation;
 import java.lang.reflect.AnnotatedType;
+import java.lang.reflect.ParameterizedType;
 import java.lang.reflect.RecordComponent;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
@@ -97,7 +99,7 @@ final class InputReader {
         }
         return new Input(
                 index,
-                flag ? Input.Kind.FLAG : Input.Kind.CHOICE,
+                flag ? Input.Kind.FLAG : component.getType() == List.class ? Input.Kind.LIST : Input.Kind.CHOICE,
                 meaning,
                 flag ? "true" : choices.keySet().iterator().next(),
                 Double.NaN,
@@ -133,6 +135,12 @@ final class InputReader {
         if (component.getType().isEnum()) {
             for (Object constant : component.getType().getEnumConstants()) {
                 choices.put(Names.kebab((Enum<?>) constant), constant);
+            }
+        } else if (component.getGenericType() instanceof ParameterizedType list
+                && list.getActualTypeArguments()[0] instanceof Class<?> element
+                && element.isEnum()) {
+            for (Object constant : element.getEnumConstants()) {
+                choices.put(((Enum<?>) constant).name().toLowerCase(Locale.ROOT), constant);
             }
         }
         return choices;

@@ -102,7 +102,7 @@ final class JsonBinder {
         Input input = entry.input();
         boolean fits = switch (token) {
             case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT -> input.numeric();
-            case VALUE_STRING -> input.kind() == Input.Kind.CHOICE;
+            case VALUE_STRING -> input.enumerated();
             case VALUE_TRUE, VALUE_FALSE -> input.kind() == Input.Kind.FLAG;
             default -> false;
         };

@@ -20,6 +20,7 @@ final class ValueReader {
             case WHOLE -> whole(entry, text, faults);
             case FLAG -> flag(entry, text, faults);
             case CHOICE -> choice(entry, text, faults);
+            case LIST -> list(entry, text, faults);
         };
     }
 
@@ -53,6 +54,14 @@ final class ValueReader {
         }
         faults.add(Wording.unreadable(entry, text));
         return null;
+    }
+
+    private static @Nullable Object list(Shape.Entry entry, String text, List<Fault> faults) {
+        List<Object> values = entry.input().list(text).orElse(null);
+        if (values == null) {
+            faults.add(Wording.unreadable(entry, text));
+        }
+        return values;
     }
 
     private static @Nullable Object choice(Shape.Entry entry, String text, List<Fault> faults) {

@@ -79,7 +79,7 @@ final class Wording {
             case FLAG ->
                 new Fault(name, FaultCode.NOT_BOOLEAN, name + " is " + quoted(text) + "; write true or false.")
                         .allowing(List.of("true", "false"));
-            case CHOICE -> notAllowed(name, text, entry.input().allowed());
+            case CHOICE, LIST -> notAllowed(name, text, entry.input().allowed());
         };
     }
 

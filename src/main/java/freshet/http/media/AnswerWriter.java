@@ -25,6 +25,7 @@ public interface AnswerWriter {
             case JSON -> new JsonWriter(table);
             case CSV -> new CsvWriter(table);
             case CBOR -> new CborWriter(table);
+            case C -> throw new IllegalStateException("A calculation writes this itself");
         };
     }
 

@@ -43,7 +43,16 @@ public record Column(
         /** One of an enumeration. */
         TEXT,
         /** A list of records. */
-        ROWS
+        ROWS,
+        /** A list of numbers. */
+        NUMBERS,
+        /** Lists of numbers in a list. */
+        MATRIX
+    }
+
+    /** Whether it is a single value. */
+    public boolean single() {
+        return kind != Kind.ROWS && kind != Kind.NUMBERS && kind != Kind.MATRIX;
     }
 
     /** The unit. */
@@ -81,6 +90,8 @@ public record Column(
             }
         } else if (value instanceof Optional<?> perhaps) {
             perhaps.ifPresentOrElse(present -> other(present, sink), () -> sink.absent(this));
+        } else if (kind == Kind.NUMBERS || kind == Kind.MATRIX) {
+            sink.numbers(this, (List<?>) value);
         } else if (kind == Kind.ROWS) {
             sink.rows(this, (List<? extends Record>) value);
         } else {

@@ -30,10 +30,10 @@ final class ColumnReader {
         Class<?> type = component.getType() == Optional.class ? argument(component) : component.getType();
         return new Column(
                 name,
-                kind(type),
+                type == List.class ? listKind(component) : kind(type),
                 reported.value(),
                 optional,
-                type == List.class
+                type == List.class && listKind(component) == Kind.ROWS
                         ? Optional.of(Table.of(argument(component).asSubclass(Record.class)))
                         : Optional.empty(),
                 choices(type),
@@ -54,10 +54,12 @@ final class ColumnReader {
         if (type.isEnum()) {
             return Kind.TEXT;
         }
-        if (type == List.class) {
-            return Kind.ROWS;
-        }
         throw new IllegalStateException("No output can be a " + type);
+    }
+
+    private static Kind listKind(RecordComponent component) {
+        java.lang.reflect.Type element = ((ParameterizedType) component.getGenericType()).getActualTypeArguments()[0];
+        return element == Double.class ? Kind.NUMBERS : element instanceof ParameterizedType ? Kind.MATRIX : Kind.ROWS;
     }
 
     private static List<String> choices(Class<?> type) {

@@ -36,6 +36,29 @@ final class JsonMembers implements Sink {
     }
 
     @Override
+    public void numbers(Column column, List<?> values) {
+        out.put(column.key());
+        list(values);
+        out.put(',');
+    }
+
+    private void list(List<?> values) {
+        out.put('[');
+        for (Object value : values) {
+            if (value instanceof List<?> inner) {
+                list(inner);
+            } else {
+                SixDigits.write((Double) value, out);
+            }
+            out.put(',');
+        }
+        if (!values.isEmpty()) {
+            out.dropLast();
+        }
+        out.put(']');
+    }
+
+    @Override
     public void rows(Column column, List<? extends Record> records) {
         out.put(column.key());
         out.put('[');

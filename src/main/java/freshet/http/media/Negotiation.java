@@ -46,7 +46,7 @@ public final class Negotiation {
                 throw new Refusal(new Fault(
                                 "format",
                                 FaultCode.NOT_ALLOWED,
-                                "This answer is not flat, so it cannot be given as " + Names.kebab(asked) + ".")
+                                "This answer cannot be given as " + Names.kebab(asked) + ".")
                         .allowing(formats.stream().<String>map(Names::kebab).toList()));
             }
             return asked;

@@ -14,6 +14,11 @@ interface Sink {
     /** A whole number, true or false, or one of an enumeration, as answers spell it. */
     void word(Column column, String value);
 
+    /** Numbers, or lists of numbers. */
+    default void numbers(Column column, List<?> values) {
+        throw new IllegalStateException("Only flat answers are written so");
+    }
+
     /** Further records. */
     void rows(Column column, List<? extends Record> records);
 }

@@ -37,7 +37,7 @@ public final class Table {
 
     /** Whether every output is a single value. */
     public boolean flat() {
-        return Arrays.stream(columns).allMatch(column -> column.rows().isEmpty());
+        return Arrays.stream(columns).allMatch(Column::single);
     }
 
     /** Passes all values of {@code result} on to {@code sink}. */

@@ -1,0 +1,231 @@
+package freshet.farm.web;
+
+import freshet.ammonia.Water;
+import freshet.answer.Answer;
+import freshet.answer.Notice;
+import freshet.farm.AlarmProfile;
+import freshet.farm.AlarmVariable;
+import freshet.farm.GuardBand;
+import freshet.farm.LimitPair;
+import freshet.quantity.Sample;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+
+/** Puts together the answer on alarm set-points. */
+final class SetpointsAnswer {
+
+    private static final OptionalDouble NONE = OptionalDouble.empty();
+    private static final double CAUTION_INSIDE_PH = 0.2;
+
+    private final AlarmSetpointsRequest request;
+    private final SensorUncertainties sensors;
+    private final ChosenLimits limits;
+    private final GuardBand guard;
+    private final List<Notice> notices = new ArrayList<>();
+
+    private SetpointsAnswer(AlarmSetpointsRequest request) {
+        this.request = request;
+        sensors = request.uncertainties();
+        limits = new ChosenLimits(request);
+        Sample sample = request.sample();
+        guard = new GuardBand(new Water(sample.ph(), sample.temperatureC(), sample.salinity(), sample.scale()));
+    }
+
+    static Answer<AlarmSetpointsResponse> to(AlarmSetpointsRequest request) {
+        return new SetpointsAnswer(request).answer();
+    }
+
+    private Answer<AlarmSetpointsResponse> answer() {
+        Band tan = tan();
+        Band nitrite = nitrite();
+        Band nitrate = concentration(
+                AlarmVariable.NO3_N, limits.nitrate(), sensors.no3NRelativeStandardUncertaintyPercent() / 100);
+        Band ph = ph();
+        Band temperature = twoSided(
+                AlarmVariable.TEMPERATURE,
+                limits.temperatureLower(),
+                limits.temperatureUpper(),
+                sensors.temperatureStandardUncertaintyC(),
+                GuardBand.LEAST_TEMPERATURE_C);
+        Band oxygen = low(
+                AlarmVariable.DISSOLVED_OXYGEN,
+                limits.oxygen(),
+                sensors.dissolvedOxygenStandardUncertaintyMgPerL(),
+                GuardBand.LEAST_OXYGEN,
+                0);
+        Band alkalinity = low(
+                AlarmVariable.ALKALINITY,
+                limits.alkalinity(),
+                0,
+                0,
+                sensors.alkalinityRelativeStandardUncertaintyPercent() / 100);
+        RefreshValues refresh = watched(AlarmVariable.TAN) && !limits.ammonia().none()
+                ? RefreshValues.of(guard, request.refreshPercent() / 100, notices)
+                : RefreshValues.NOTHING;
+        conditional();
+        AlarmSetpointsResponse response = new AlarmSetpointsResponse(
+                tan.high(),
+                tan.highHigh(),
+                tan.deadband(),
+                nitrite.high(),
+                nitrite.highHigh(),
+                nitrite.deadband(),
+                nitrate.high(),
+                nitrate.highHigh(),
+                nitrate.deadband(),
+                ph.lowLow(),
+                ph.low(),
+                ph.high(),
+                ph.highHigh(),
+                ph.deadband(),
+                temperature.lowLow(),
+                temperature.low(),
+                temperature.high(),
+                temperature.highHigh(),
+                temperature.deadband(),
+                oxygen.lowLow(),
+                oxygen.low(),
+                oxygen.deadband(),
+                alkalinity.lowLow(),
+                alkalinity.low(),
+                alkalinity.deadband(),
+                refresh.phAbove(),
+                refresh.phBelow(),
+                refresh.temperatureAboveC(),
+                refresh.temperatureBelowC());
+        return new Answer<>(
+                response,
+                GuardBand.METHOD,
+                guard.dissociation()
+                        .validity(
+                                request.sample().temperatureC(),
+                                request.sample().salinity()),
+                notices);
+    }
+
+    private boolean watched(AlarmVariable variable) {
+        return request.variables().contains(variable);
+    }
+
+    private Band tan() {
+        double u = guard.relativeUncertainty(
+                sensors.tanRelativeStandardUncertaintyPercent() / 100,
+                sensors.phStandardUncertainty(),
+                sensors.temperatureStandardUncertaintyC());
+        LimitPair guarded = limits.ammonia().times(StrictMath.exp(-GuardBand.Z * u) / guard.fraction());
+        return high(AlarmVariable.TAN, guarded, sensors.tanRelativeStandardUncertaintyPercent() / 100);
+    }
+
+    private Band nitrite() {
+        double r = sensors.no2NRelativeStandardUncertaintyPercent() / 100;
+        Double chloride = request.chlorideMgPerL();
+        AlarmProfile profile = request.profile();
+        LimitPair pair = limits.nitrite();
+        if (chloride != null && profile != null) {
+            double bound = chloride / profile.chlorideRatio();
+            if (bound < pair.critical().orElse(0)) {
+                double c = sensors.chlorideRelativeStandardUncertaintyPercent() / 100;
+                return concentration(
+                        AlarmVariable.NO2_N,
+                        LimitPair.of(Math.min(pair.caution().orElse(bound), 0.8 * bound), bound),
+                        StrictMath.sqrt(r * r + c * c));
+            }
+        } else if (chloride != null) {
+            notices.add(new Notice(
+                    "input-not-used",
+                    "chloride_mg_per_l",
+                    "With limits of your own there is no ratio to use chloride with."));
+        }
+        return concentration(AlarmVariable.NO2_N, pair, r);
+    }
+
+    private Band concentration(AlarmVariable variable, LimitPair pair, double r) {
+        return high(variable, pair.times(StrictMath.exp(-GuardBand.Z * r)), r);
+    }
+
+    private Band high(AlarmVariable variable, LimitPair guarded, double r) {
+        if (!watched(variable) || guarded.none()) {
+            return Band.NOTHING;
+        }
+        double high = guarded.caution().orElse(guarded.critical().orElse(0));
+        if (!(high > 0)
+                || guarded.critical().isPresent()
+                        && guarded.critical().getAsDouble() <= high
+                        && guarded.caution().isPresent()) {
+            return crossed(variable);
+        }
+        double deadband = Math.max(2 * r * high, GuardBand.LEAST_SHARE * high);
+        return new Band(NONE, NONE, guarded.caution(), guarded.critical(), OptionalDouble.of(deadband));
+    }
+
+    private Band low(AlarmVariable variable, LimitPair pair, double u, double floor, double r) {
+        if (!watched(variable) || pair.none()) {
+            return Band.NOTHING;
+        }
+        LimitPair guarded = pair.plus(GuardBand.Z * u).times(1 + GuardBand.Z * r);
+        double low = guarded.caution().orElse(guarded.critical().orElse(0));
+        if (!(low > 0)
+                || guarded.critical().isPresent()
+                        && guarded.critical().getAsDouble() >= low
+                        && guarded.caution().isPresent()) {
+            return crossed(variable);
+        }
+        double deadband = r > 0
+                ? Math.max(2 * r * low, GuardBand.LEAST_SHARE * low)
+                : Math.max(2 * u, floor > 0 ? floor : GuardBand.LEAST_SHARE * low);
+        return new Band(guarded.critical(), guarded.caution(), NONE, NONE, OptionalDouble.of(deadband));
+    }
+
+    private Band ph() {
+        LimitPair upper = limits.phUpper();
+        Double tan = request.tanMgPerL();
+        OptionalDouble critical = limits.ammonia().critical();
+        if (tan != null && critical.isPresent() && watched(AlarmVariable.PH)) {
+            double share = critical.getAsDouble() / tan;
+            double bound = share > 0 && share < 1 ? guard.phAt(share) : Double.POSITIVE_INFINITY;
+            if (bound < upper.critical().orElse(Double.POSITIVE_INFINITY)) {
+                upper = LimitPair.of(Math.min(upper.caution().orElse(bound), bound - CAUTION_INSIDE_PH), bound);
+                notices.add(new Notice(
+                        "ph-bound-by-ammonia",
+                        "ph_high_high",
+                        "At this pH the present total ammonia meets its critical limit: pH is the live alarm."));
+            }
+        }
+        return twoSided(AlarmVariable.PH, limits.phLower(), upper, sensors.phStandardUncertainty(), GuardBand.LEAST_PH);
+    }
+
+    private Band twoSided(AlarmVariable variable, LimitPair lower, LimitPair upper, double u, double floor) {
+        if (!watched(variable) || lower.none() && upper.none()) {
+            return Band.NOTHING;
+        }
+        LimitPair low = lower.plus(GuardBand.Z * u);
+        LimitPair high = upper.plus(-GuardBand.Z * u);
+        Band band = new Band(low.critical(), low.caution(), high.caution(), high.critical(), NONE);
+        return band.inOrder() ? band.withDeadband(Math.max(2 * u, floor)) : crossed(variable);
+    }
+
+    private Band crossed(AlarmVariable variable) {
+        notices.add(new Notice(
+                "uncertainty-too-large",
+                ChosenLimits.name(variable),
+                "The sensor is too uncertain for these limits: after guarding the alarms cross or vanish. Calibrate."));
+        return Band.NOTHING;
+    }
+
+    private void conditional() {
+        if (watched(AlarmVariable.TAN)) {
+            notices.add(new Notice(
+                    "limit-conditional",
+                    "tan_high_mg_per_l",
+                    "For this pH and temperature: ask again at the refresh values, at half of each if both drift."));
+        }
+        Sample sample = request.sample();
+        if (sample.salinity() > 0.5 && sample.phScale() == null) {
+            notices.add(new Notice(
+                    "ph-scale-assumed-nbs",
+                    "ph_scale",
+                    "ph was taken as a reading of a probe on NBS or IUPAC buffers."));
+        }
+    }
+}
