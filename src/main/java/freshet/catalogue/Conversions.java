@@ -6,6 +6,7 @@ import freshet.quantity.Alternative;
 import freshet.quantity.Feed;
 import freshet.quantity.FlowPerDay;
 import freshet.quantity.Nitrate;
+import freshet.quantity.Nitrite;
 import freshet.quantity.Temperature;
 import freshet.quantity.TotalAmmonia;
 import freshet.quantity.Volume;
@@ -21,6 +22,7 @@ final class Conversions {
 
     private static final List<Class<? extends Annotation>> QUANTITIES = List.of(
             TotalAmmonia.class,
+            Nitrite.class,
             Nitrate.class,
             Alkalinity.class,
             Temperature.class,

@@ -27,6 +27,11 @@ import freshet.nitrification.BiofilterSizing;
 import freshet.nitrification.LoadMethod;
 import freshet.nitrification.Ration;
 import freshet.nitrification.Stoichiometry;
+import freshet.nitrite.ChlorideProtection;
+import freshet.nitrite.ChlorideRatios;
+import freshet.nitrite.NitriteMethod;
+import freshet.nitrite.NitrousAcidInhibition;
+import freshet.nitrite.SaltDose;
 import freshet.oxygen.BensonKrause1984;
 import freshet.oxygen.StandardAtmosphere1976;
 import freshet.salinity.MilleroPoisson1981;
@@ -52,6 +57,12 @@ final class Methods {
                     Stream.of(PracticalSalinity1978.METHOD, MilleroPoisson1981.METHOD),
                     of(AmmoniaMethod.values(), choice -> choice.dissociation().method()),
                     of(Nh3Guideline.values(), Nh3Guideline::method),
+                    of(NitriteMethod.values(), choice -> choice.dissociation().method()),
+                    Stream.of(
+                            NitrousAcidInhibition.METHOD,
+                            ChlorideProtection.METHOD,
+                            ChlorideRatios.METHOD,
+                            SaltDose.METHOD),
                     of(LoadMethod.values(), LoadMethod::method),
                     of(Stoichiometry.values(), Stoichiometry::method),
                     Stream.of(Ration.METHOD, BiofilterCapacity.METHOD, BiofilterSizing.METHOD),

@@ -5,7 +5,8 @@ import java.util.List;
 
 /**
  * Molar masses in g/mol, from the abridged standard atomic weights (IUPAC-CIAAW 2021; Prohaska et al. 2022, Pure Appl.
- * Chem. 94:573-600): H 1.008, C 12.011, N 14.007, O 15.999, Na 22.990, Ca 40.078. The mass of electrons is neglected.
+ * Chem. 94:573-600): H 1.008, C 12.011, N 14.007, O 15.999, Na 22.990, Cl 35.45, K 39.098, Ca 40.078. The mass of electrons
+ * is neglected.
  */
 public final class MolarMass {
 
@@ -35,6 +36,16 @@ public final class MolarMass {
     public static final double CALCIUM_CARBONATE_EQUIVALENT = 50.043;
     /** Sodium bicarbonate, NaHCO3. */
     public static final double SODIUM_BICARBONATE = 84.006;
+    /** Chloride, Cl-. */
+    public static final double CHLORIDE = 35.45;
+    /** Sodium chloride, NaCl. */
+    public static final double SODIUM_CHLORIDE = 58.44;
+    /** Potassium chloride, KCl. */
+    public static final double POTASSIUM_CHLORIDE = 74.548;
+    /** Calcium chloride without water, CaCl2. */
+    public static final double CALCIUM_CHLORIDE = 110.978;
+    /** Calcium chloride dihydrate, CaCl2 2 H2O. */
+    public static final double CALCIUM_CHLORIDE_DIHYDRATE = 147.008;
     /** Cells of nitrifiers as C5H7O2N. */
     public static final double CELLS = 113.116;
 
@@ -58,6 +69,11 @@ public final class MolarMass {
             new Constant("Ca", CALCIUM, "g/mol", "calcium"),
             new Constant("CaCO3/2", CALCIUM_CARBONATE_EQUIVALENT, "g/eq", "calcium carbonate per equivalent"),
             new Constant("NaHCO3", SODIUM_BICARBONATE, "g/mol", "sodium bicarbonate"),
+            new Constant("Cl", CHLORIDE, "g/mol", "chloride"),
+            new Constant("NaCl", SODIUM_CHLORIDE, "g/mol", "sodium chloride"),
+            new Constant("KCl", POTASSIUM_CHLORIDE, "g/mol", "potassium chloride"),
+            new Constant("CaCl2", CALCIUM_CHLORIDE, "g/mol", "calcium chloride without water"),
+            new Constant("CaCl2.2H2O", CALCIUM_CHLORIDE_DIHYDRATE, "g/mol", "calcium chloride dihydrate"),
             new Constant("C5H7O2N", CELLS, "g/mol", "cells of nitrifiers"));
 
     private MolarMass() {}

@@ -41,6 +41,8 @@ class CalculationsContractTest {
                 .contains(
                         "ammonia/speciation",
                         "ammonia/limits",
+                        "nitrite/speciation",
+                        "nitrite/protection",
                         "nitrification/load",
                         "nitrification/capacity",
                         "nitrification/sizing",

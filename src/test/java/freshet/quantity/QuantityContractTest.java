@@ -20,6 +20,9 @@ class QuantityContractTest {
     private static final List<String> DIMENSIONLESS = List.of(
             "salinity",
             "nh3_fraction",
+            "hno2_fraction",
+            "chloride_to_no2_n_mass_ratio",
+            "present_mass_ratio",
             "stages",
             "steps",
             "points",

@@ -15,10 +15,14 @@ public final class Names {
 
     private Names() {}
 
-    /** The wire name of a record component: {@code tanMgPerL} is {@code tan_mg_per_l}. */
+    /**
+     * The wire name of a record component: {@code tanMgPerL} is {@code tan_mg_per_l}. One underscore at the end, which a
+     * word of the Java language needs to be a name, is dropped.
+     */
     public static String snake(String component) {
+        String bare = component.endsWith("_") ? component.substring(0, component.length() - 1) : component;
         StringBuilder name = new StringBuilder();
-        for (char c : component.toCharArray()) {
+        for (char c : bare.toCharArray()) {
             if (Character.isUpperCase(c)) {
                 name.append('_');
             }

@@ -17,6 +17,7 @@ class NamesTest {
     void componentsBecomeSnakeCaseAndConstantsKebabCase() {
         assertThat(Names.snake("referenceRateGPerM2PerDay")).isEqualTo("reference_rate_g_per_m2_per_day");
         assertThat(Names.snake("nh3NMgPerL")).isEqualTo("nh3_n_mg_per_l");
+        assertThat(Names.snake("protected_")).isEqualTo("protected");
         assertThat(Names.kebab(AmmoniaMethod.EMERSON_1975)).isEqualTo("emerson-1975");
     }
 
