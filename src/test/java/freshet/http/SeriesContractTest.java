@@ -83,7 +83,7 @@ class SeriesContractTest {
             JsonNode single = MAPPER.readTree(single(calculation, "&view=compact"));
             Map<String, String> inputs = inputs(calculation);
             String table = "time_stamp," + String.join(",", inputs.keySet()) + "\n2026-01-01 00:00,"
-                    + String.join(",", inputs.values()) + "\n";
+                    + cells(inputs) + "\n";
             Response series = post(calculation, "", CSV, table);
             assertThat(series.asString()).startsWith(table.substring(0, table.indexOf('\n')));
             NamedCsvRecord row = CsvReader.builder().ofNamedCsvRecord(series.asString()).stream()
@@ -95,7 +95,7 @@ class SeriesContractTest {
                 if (!name.startsWith("method")) {
                     assertThat(row.getField(name))
                             .as(name)
-                            .isEqualTo(value.isNumber() ? value.toString() : value.asString());
+                            .isEqualTo(value.isNumber() ? value.decimalValue().toPlainString() : value.asString());
                 }
             });
         });
@@ -107,7 +107,7 @@ class SeriesContractTest {
             Map<String, String> inputs = inputs(calculation);
             String last = List.copyOf(inputs.keySet()).get(inputs.size() - 1);
             String constant = last + "=" + inputs.remove(last);
-            String table = String.join(",", inputs.keySet()) + "\n" + String.join(",", inputs.values()) + "\n";
+            String table = String.join(",", inputs.keySet()) + "\n" + cells(inputs) + "\n";
             String answer =
                     post(calculation, "?format=ndjson&" + constant, CSV, table).asString();
             assertThat(answer).isEqualTo(single(calculation, ""));
@@ -161,6 +161,12 @@ class SeriesContractTest {
             inputs.put(pair.substring(0, pair.indexOf('=')), pair.substring(pair.indexOf('=') + 1));
         }
         return inputs;
+    }
+
+    private static String cells(Map<String, String> inputs) {
+        return inputs.values().stream()
+                .map(value -> value.contains(",") ? "\"" + value + "\"" : value)
+                .collect(Collectors.joining(","));
     }
 
     private static String row(Calculation<?, ?> calculation) {

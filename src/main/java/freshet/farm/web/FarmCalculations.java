@@ -32,6 +32,7 @@ class FarmCalculations {
                         AlarmProfile.MARINE.method(),
                         AmmoniaMethod.EMERSON_1975.dissociation().method(),
                         AmmoniaMethod.CLEGG_WHITFIELD_1995.dissociation().method()))
-                .shownBy("ph=7.4&temperature_c=26&profile=warm-water&tan_mg_per_l=0.8");
+                .shownBy("ph=7.4&temperature_c=26&profile=warm-water&tan_mg_per_l=0.8"
+                        + "&variables=tan,ph,temperature,dissolved_oxygen");
     }
 }
