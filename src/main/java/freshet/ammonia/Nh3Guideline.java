@@ -89,6 +89,11 @@ public enum Nh3Guideline {
         return method;
     }
 
+    /** Whether it is for salt water. */
+    public boolean forSaltWater() {
+        return this == USEPA_1989_SALTWATER_ACUTE || this == USEPA_1989_SALTWATER_CHRONIC;
+    }
+
     /** Whether pH and temperature (°C) lie where such limits are applied to receiving waters. */
     public Validity validity(double ph, double temperatureC) {
         return Validity.of(Applied.PH, ph).and(Applied.TEMPERATURE, temperatureC);

@@ -3,6 +3,7 @@ package freshet.catalogue;
 import freshet.acidity.Dickson1990;
 import freshet.acidity.DicksonRiley1979;
 import freshet.ammonia.AmmoniaMethod;
+import freshet.ammonia.AmmoniaUncertainty;
 import freshet.ammonia.LimitTable;
 import freshet.ammonia.Nh3Guideline;
 import freshet.carbonate.AlkalinityDose;
@@ -51,7 +52,12 @@ final class Methods {
                     Stream.of(CarbonateSystem.METHOD, WatersMilleroWoosley2014.METHOD, Millero1995.METHOD),
                     Stream.of(Dickson1990Borate.METHOD, PlummerBusenberg1982.METHOD, Mucci1983.METHOD),
                     Stream.of(ProbeActivity.METHOD, Davies1962.METHOD, Takahashi1982.METHOD),
-                    Stream.of(AlkalinityDose.METHOD, Blend.METHOD, LimitTable.METHOD, GuardBand.METHOD),
+                    Stream.of(
+                            AlkalinityDose.METHOD,
+                            Blend.METHOD,
+                            LimitTable.METHOD,
+                            GuardBand.METHOD,
+                            AmmoniaUncertainty.METHOD),
                     of(AlarmProfile.values(), AlarmProfile::method),
                     Stream.of(BensonKrause1984.METHOD, StandardAtmosphere1976.METHOD),
                     Stream.of(PracticalSalinity1978.METHOD, MilleroPoisson1981.METHOD),

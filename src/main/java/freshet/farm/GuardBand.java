@@ -3,6 +3,7 @@ package freshet.farm;
 import freshet.acidity.PhScale;
 import freshet.ammonia.AmmoniaDissociation;
 import freshet.ammonia.AmmoniaMethod;
+import freshet.ammonia.AmmoniaUncertainty;
 import freshet.ammonia.Water;
 import freshet.method.Citation;
 import freshet.method.Constant;
@@ -30,8 +31,6 @@ public final class GuardBand {
                             + " NO2-N, NO3-N: set = L exp(-z r); others: L - z u, L + z u; deadband max(2 u, floor);"
                             + " refresh where the limit of TAN has changed by p: f/(1 - p) above, f/(1 + p) below",
                     new Constant("z", 1.645, "1", "95 %, one-sided"),
-                    new Constant("u(pKa) fresh", 0.005, "1"),
-                    new Constant("u(pKa) saline", 0.022, "1"),
                     new Constant("least deadband of concentrations", 0.05, "1", "of the set-point; judgement"),
                     new Constant("least deadband of pH", 0.05, "[pH]", "judgement"),
                     new Constant("least deadband of temperature", 0.3, "Cel", "judgement"),
@@ -40,6 +39,7 @@ public final class GuardBand {
                     "covers the sensors only: neither stratification, nor drift since calibration, nor the time between"
                             + " samples")
             .uses(
+                    AmmoniaUncertainty.METHOD,
                     AmmoniaMethod.EMERSON_1975.dissociation().method(),
                     AmmoniaMethod.CLEGG_WHITFIELD_1995.dissociation().method(),
                     AlarmProfile.COLD_WATER.method(),
@@ -49,18 +49,13 @@ public final class GuardBand {
     /** 95 %, one-sided. */
     public static final double Z = METHOD.values()[0];
     /** Least deadband of a concentration, of the set-point. */
-    public static final double LEAST_SHARE = METHOD.values()[3];
+    public static final double LEAST_SHARE = METHOD.values()[1];
     /** Least deadband of pH. */
-    public static final double LEAST_PH = METHOD.values()[4];
+    public static final double LEAST_PH = METHOD.values()[2];
     /** Least deadband of temperature, °C. */
-    public static final double LEAST_TEMPERATURE_C = METHOD.values()[5];
+    public static final double LEAST_TEMPERATURE_C = METHOD.values()[3];
     /** Least deadband of oxygen, mg/L. */
-    public static final double LEAST_OXYGEN = METHOD.values()[6];
-
-    private static final double FRESH_PKA = METHOD.values()[1];
-    private static final double SALINE_PKA = METHOD.values()[2];
-    private static final double LN_10 = StrictMath.log(10);
-    private static final double STEP_C = 0.01;
+    public static final double LEAST_OXYGEN = METHOD.values()[4];
 
     private final Water water;
     private final AmmoniaDissociation dissociation;
@@ -95,11 +90,7 @@ public final class GuardBand {
      * @param temperatureC standard uncertainty of temperature, °C
      */
     public double relativeUncertainty(double tan, double ph, double temperatureC) {
-        double k = LN_10 * (1 - fraction());
-        double slope = (pKa(water.temperatureC() + STEP_C) - pKa(water.temperatureC() - STEP_C)) / (2 * STEP_C);
-        double constant = water.salinity() > AmmoniaMethod.FRESH_SALINITY ? SALINE_PKA : FRESH_PKA;
-        double drift = slope * temperatureC;
-        return StrictMath.sqrt(tan * tan + k * k * (ph * ph + constant * constant + drift * drift));
+        return AmmoniaUncertainty.relative(water, dissociation, new AmmoniaUncertainty.Sensors(tan, ph, temperatureC));
     }
 
     /** The pH at which the un-ionized share would be {@code fraction}, 0 &lt; fraction &lt; 1; on the water's scale. */

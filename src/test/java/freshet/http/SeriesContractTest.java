@@ -82,8 +82,8 @@ class SeriesContractTest {
         return each(calculation -> {
             JsonNode single = MAPPER.readTree(single(calculation, "&view=compact"));
             Map<String, String> inputs = inputs(calculation);
-            String table = "time_stamp," + String.join(",", inputs.keySet()) + "\n2026-01-01 00:00,"
-                    + cells(inputs) + "\n";
+            String table =
+                    "time_stamp," + String.join(",", inputs.keySet()) + "\n2026-01-01 00:00," + cells(inputs) + "\n";
             Response series = post(calculation, "", CSV, table);
             assertThat(series.asString()).startsWith(table.substring(0, table.indexOf('\n')));
             NamedCsvRecord row = CsvReader.builder().ofNamedCsvRecord(series.asString()).stream()

@@ -19,9 +19,10 @@ import org.springframework.boot.test.web.server.LocalServerPort;
 class SeriesHttpTest {
 
     private static final String PATH = "/v1/ammonia/speciation/series";
-    private static final String RESULTS = "nh3_n_mg_per_l,nh3_mg_per_l,nh4_n_mg_per_l,nh4_mg_per_l,nh3_fraction,pka,";
+    private static final String RESULTS = "nh3_n_mg_per_l,nh3_mg_per_l,nh4_n_mg_per_l,nh4_mg_per_l,nh3_fraction,pka,"
+            + "nh3_n_standard_uncertainty_mg_per_l,nh3_n_lower_mg_per_l,nh3_n_upper_mg_per_l,";
     private static final String HEADER = "tan_mg_per_l,ph,temperature_c";
-    private static final String ANSWER = "0.0853803,0.103813,1.11462,1.43547,0.0711502,9.21577,within,,";
+    private static final String ANSWER = "0.0853803,0.103813,1.11462,1.43547,0.0711502,9.21577,,,,within,,";
 
     @LocalServerPort
     private int port;
@@ -55,9 +56,9 @@ class SeriesHttpTest {
         assertThat(answer.lines().skip(1))
                 .containsExactly(
                         "1.2,8.1,26," + ANSWER,
-                        "7;5,,200,,,,,,,,,row 2; tan_mg_per_l: not-a-number; temperature_c: above-maximum; ph: missing",
-                        "1.2,8.1,,,,,,,,,,row 3; malformed",
-                        "1.2,8.1,26,,,,,,,,,row 4; malformed",
+                        "7;5,,200,,,,,,,,,,,,row 2; tan_mg_per_l: not-a-number; temperature_c: above-maximum; ph: missing",
+                        "1.2,8.1,,,,,,,,,,,,,row 3; malformed",
+                        "1.2,8.1,26,,,,,,,,,,,,row 4; malformed",
                         "1.2,8.1,26," + ANSWER);
     }
 
@@ -71,7 +72,7 @@ class SeriesHttpTest {
                 .containsExactly(
                         "1.2,8.1,26,," + ANSWER,
                         "1.2,8.1,,78.8," + ANSWER,
-                        "1.2,8.1,26,78.8,,,,,,,,,row 3; temperature_f: conflict");
+                        "1.2,8.1,26,78.8,,,,,,,,,,,,row 3; temperature_f: conflict");
     }
 
     @Test
@@ -81,8 +82,8 @@ class SeriesHttpTest {
                 .containsExactly(
                         "nh3_n_mg_per_l,error,tank," + HEADER + "," + RESULTS.replace("nh3_n_mg_per_l,", "")
                                 + "validity,notice_codes",
-                        "0.0853803,,A,1.2,8.1,26,0.103813,1.11462,1.43547,0.0711502,9.21577,within,",
-                        ",row 2; ph: not-a-number,A,1.2,x,26,,,,,,,");
+                        "0.0853803,,A,1.2,8.1,26,0.103813,1.11462,1.43547,0.0711502,9.21577,,,,within,",
+                        ",row 2; ph: not-a-number,A,1.2,x,26,,,,,,,,,,");
         assertThat(csv(csv(HEADER + "\n1.2,8.1,26\n", ""), "")).isEqualTo(csv(HEADER + "\n1.2,8.1,26\n", ""));
     }
 
@@ -129,7 +130,7 @@ class SeriesHttpTest {
     @ValueSource(strings = {"1.2,\"8.1,26\n1.2,8.1,26\n", "1.2,\"8.1\"x,26\n1.2,8.1,26\n", "1.2,8.1,\""})
     void whereNoFurtherRowCanBeReadTheLastOneSaysSo(String rest) {
         assertThat(csv(HEADER + "\n1.2,8.1,26\n" + rest, "").lines().skip(1))
-                .containsExactly("1.2,8.1,26," + ANSWER, ",,,,,,,,,,,row 2; malformed");
+                .containsExactly("1.2,8.1,26," + ANSWER, ",,,,,,,,,,,,,,row 2; malformed");
     }
 
     @Test
@@ -138,7 +139,7 @@ class SeriesHttpTest {
         assertThat(csv("tank," + HEADER + "\n" + tooLong + ",1.2,8.1,26\nA,1.2,8.1,26\n", "")
                         .lines()
                         .skip(1))
-                .containsExactly(",,,,,,,,,,,,row 1; too-large", "A,1.2,8.1,26," + ANSWER);
+                .containsExactly(",,,,,,,,,,,,,,,row 1; too-large", "A,1.2,8.1,26," + ANSWER);
         String rows = "{\"tag\":\"" + tooLong + "\"}\n" + row() + "\n{\"tag\":\"" + tooLong.repeat(9) + "\"}\n" + row();
         assertThat(ndjson(rows, "?view=compact").lines().map(line -> line.substring(0, 31)))
                 .containsExactly(
@@ -153,8 +154,8 @@ class SeriesHttpTest {
         String table = "tank;" + HEADER.replace(',', ';') + "\nA.1,2;1,2;8,1;26\nA;1.2;8,1;26\n";
         assertThat(csv(table, "?csv=semicolon").lines().skip(1))
                 .containsExactly(
-                        "A.1,2;1,2;8,1;26;0,0853803;0,103813;1,11462;1,43547;0,0711502;9,21577;within;;",
-                        "A;1.2;8,1;26;;;;;;;;;\"row 2; tan_mg_per_l: not-a-number\"");
+                        "A.1,2;1,2;8,1;26;0,0853803;0,103813;1,11462;1,43547;0,0711502;9,21577;;;;within;;",
+                        "A;1.2;8,1;26;;;;;;;;;;;;\"row 2; tan_mg_per_l: not-a-number\"");
         assertThat(csv("tank," + HEADER + "\nA,\"1,2\",8.1,26\n", "?csv=comma")).contains("not-a-number");
     }
 

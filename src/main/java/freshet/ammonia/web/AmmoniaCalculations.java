@@ -2,6 +2,7 @@ package freshet.ammonia.web;
 
 import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.AmmoniaSpeciation;
+import freshet.ammonia.AmmoniaUncertainty;
 import freshet.ammonia.LimitTable;
 import freshet.ammonia.Nh3Guideline;
 import freshet.answer.Answer;
@@ -11,6 +12,7 @@ import freshet.method.Method;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 import java.util.stream.Stream;
 import org.springframework.context.annotation.Bean;
 import org.springframework.context.annotation.Configuration;
@@ -33,7 +35,8 @@ class AmmoniaCalculations {
                 .describedAs(
                         "How much of the total ammonia is the toxic un-ionized form",
                         "An error of 0.1 in pH is an error of about 25 % in NH3: calibrate the probe.")
-                .using(DISSOCIATION_METHODS)
+                .using(Stream.concat(DISSOCIATION_METHODS.stream(), Stream.of(AmmoniaUncertainty.METHOD))
+                        .toList())
                 .shownBy("tan_mg_per_l=1.2&ph=8.1&temperature_c=26");
     }
 
@@ -77,10 +80,18 @@ class AmmoniaCalculations {
     private static Answer<AmmoniaSpeciationResponse> speciation(AmmoniaSpeciationRequest request) {
         DissociationChoice choice = DissociationChoice.of(request.sample(), request.method());
         AmmoniaSpeciation speciation = AmmoniaSpeciation.of(request.tanMgPerL(), choice.water(), choice.dissociation());
+        if (!request.namesUncertainty()) {
+            return new Answer<>(
+                    AmmoniaSpeciationResponse.of(speciation, OptionalDouble.empty()),
+                    choice.dissociation().method(),
+                    choice.validity(),
+                    choice.notices());
+        }
+        SpeciationUncertainty uncertainty = new SpeciationUncertainty(request, choice);
         return new Answer<>(
-                AmmoniaSpeciationResponse.of(speciation),
+                AmmoniaSpeciationResponse.of(speciation, uncertainty.relative()),
                 choice.dissociation().method(),
                 choice.validity(),
-                choice.notices());
+                uncertainty.notices());
     }
 }

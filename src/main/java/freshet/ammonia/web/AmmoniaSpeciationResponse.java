@@ -1,7 +1,10 @@
 package freshet.ammonia.web;
 
 import freshet.ammonia.AmmoniaSpeciation;
+import freshet.ammonia.AmmoniaUncertainty;
 import freshet.quantity.Reported;
+import java.util.OptionalDouble;
+import java.util.function.DoubleUnaryOperator;
 
 record AmmoniaSpeciationResponse(
         @Reported("Un-ionized ammonia, the toxic form, as N")
@@ -15,15 +18,35 @@ record AmmoniaSpeciationResponse(
         double nh3Fraction,
 
         @Reported("pKa of ammonium on the scale of the given pH")
-        double pka) {
+        double pka,
 
-    static AmmoniaSpeciationResponse of(AmmoniaSpeciation speciation) {
+        @Reported("Standard uncertainty of un-ionized ammonia as N; where an uncertainty was given")
+        OptionalDouble nh3NStandardUncertaintyMgPerL,
+
+        @Reported("Lower bound of un-ionized ammonia as N, of an interval of 95 %")
+        OptionalDouble nh3NLowerMgPerL,
+
+        @Reported("Upper bound of un-ionized ammonia as N, of an interval of 95 %")
+        OptionalDouble nh3NUpperMgPerL) {
+
+    /** With the relative standard uncertainty of un-ionized ammonia, where it is asked for. */
+    static AmmoniaSpeciationResponse of(AmmoniaSpeciation speciation, OptionalDouble relative) {
         return new AmmoniaSpeciationResponse(
                 speciation.nh3NMgPerL(),
                 speciation.nh3MgPerL(),
                 speciation.nh4NMgPerL(),
                 speciation.nh4MgPerL(),
                 speciation.nh3Fraction(),
-                speciation.pKa());
+                speciation.pKa(),
+                times(speciation, relative, u -> u),
+                times(speciation, relative, u -> 1 / AmmoniaUncertainty.factor(u)),
+                times(speciation, relative, AmmoniaUncertainty::factor));
+    }
+
+    private static OptionalDouble times(
+            AmmoniaSpeciation speciation, OptionalDouble relative, DoubleUnaryOperator factor) {
+        return relative.isEmpty()
+                ? relative
+                : OptionalDouble.of(speciation.nh3NMgPerL() * factor.applyAsDouble(relative.getAsDouble()));
     }
 }

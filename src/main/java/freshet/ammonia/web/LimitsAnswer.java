@@ -1,6 +1,7 @@
 package freshet.ammonia.web;
 
 import freshet.ammonia.AmmoniaLimits;
+import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.AmmoniaSpeciation;
 import freshet.ammonia.Nh3Guideline;
 import freshet.answer.Answer;
@@ -42,6 +43,13 @@ final class LimitsAnswer {
                     "nh3_guideline",
                     guideline.method().id()
                             + " is for receiving waters: not advice for a culture tank and not a permit."));
+            if (guideline.forSaltWater() != request.sample().salinity() > AmmoniaMethod.FRESH_SALINITY) {
+                notices.add(new Notice(
+                        "guideline-for-other-water",
+                        "nh3_guideline",
+                        guideline.method().id() + " is for " + (guideline.forSaltWater() ? "salt" : "fresh")
+                                + " water, and salinity is " + SixDigits.text(request.sample().salinity()) + "."));
+            }
         }
         notices.add(new Notice(
                 "limit-conditional",
@@ -88,12 +96,14 @@ final class LimitsAnswer {
     }
 
     private OptionalDouble noticed(String field, String code, String range, OptionalDouble limit) {
+        Double tan = request.tanMgPerL();
+        boolean exceeded = tan != null && tan > limits.tanLimitMgPerL();
         if (limit.isEmpty()) {
             notices.add(new Notice(
                     code,
                     field,
-                    "The present total ammonia does not meet " + SixDigits.text(limits.nh3NLimitMgPerL())
-                            + " mg/L NH3-N anywhere within " + range + "."));
+                    "Within " + range + " NH3-N is everywhere " + (exceeded ? "above " : "below ")
+                            + SixDigits.text(limits.nh3NLimitMgPerL()) + " mg/L: there is no value where they meet."));
         }
         return limit;
     }

@@ -104,10 +104,13 @@ final class Schemas {
 
     private static String description(Input input, Spelling spelling) {
         String unit = input.numeric() ? spelling.unit().with("").strip() : "";
+        if (!spelling.name().equals(input.name())) {
+            return "Instead of " + input.name() + ", in the basis and the unit that this name states"
+                    + (unit.isEmpty() ? "" : "; " + unit);
+        }
         return input.meaning()
                 + (input.kind() == Input.Kind.LIST ? ": " + String.join(", ", input.allowed()) : "")
-                + (unit.isEmpty() ? "" : "; " + unit)
-                + (spelling.name().equals(input.name()) ? "" : ", instead of " + input.name());
+                + (unit.isEmpty() ? "" : "; " + unit);
     }
 
     private static BigDecimal decimal(double value) {

@@ -70,7 +70,9 @@ final class SeriesPath {
     private static Content request(Calculation<?, ?> calculation, Example example) {
         MediaType table = text(TABLE);
         String header = String.join(",", example.inputs().keySet());
-        String row = example.inputs().values().stream().map(value -> String.valueOf(value).contains(",") ? "\"" + value + "\"" : String.valueOf(value)).collect(Collectors.joining(","));
+        String row = example.inputs().values().stream()
+                .map(value -> String.valueOf(value).contains(",") ? "\"" + value + "\"" : String.valueOf(value))
+                .collect(Collectors.joining(","));
         table.setExample(header + "\r\n" + row + "\r\n");
         return content(calculation.noun() + "SeriesRequest", example.inputs(), table);
     }

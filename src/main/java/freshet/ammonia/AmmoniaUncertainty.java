@@ -1,0 +1,75 @@
+package freshet.ammonia;
+
+import freshet.method.Citation;
+import freshet.method.Constant;
+import freshet.method.Method;
+import freshet.method.Seen;
+
+/**
+ * How uncertain un-ionized ammonia is, to first order in its logarithm: JCGM 100:2008, inputs independent.
+ *
+ * <p>{@code u^2 = r^2 + k^2 (u(pH)^2 + u(pKa)^2 + (dpKa/dT u(T))^2)}, {@code k = ln10 (1 - f)}, r the relative standard
+ * uncertainty of total ammonia, f the un-ionized share.
+ */
+public final class AmmoniaUncertainty {
+
+    /** Its entry in the catalogue. */
+    public static final Method METHOD = Method.of(
+                    "ammonia-uncertainty",
+                    "Standard uncertainty of un-ionized ammonia and bounds of 95 %",
+                    Citation.withoutDoi(
+                            "JCGM 100:2008",
+                            "JCGM 100:2008 Evaluation of measurement data - Guide to the expression of uncertainty in"
+                                    + " measurement; checked against the Monte Carlo method of JCGM 101:2008"),
+                    Seen.MEMORY)
+            .equation(
+                    "u^2 = r^2 + k^2 (u(pH)^2 + u(pKa)^2 + (dpKa/dT u(T))^2), k = ln10 (1 - f); bounds NH3 exp(-z u) and"
+                            + " NH3 exp(z u); inputs independent",
+                    new Constant("z", 1.96, "1", "95 %, two-sided"),
+                    new Constant("u(pKa) fresh", 0.005, "1", "salinity to 0.5, without the neglected ionic strength"),
+                    new Constant("u(pKa) saline", 0.022, "1", "5 % of K as Clegg and Whitfield 1995 state"))
+            .accuracy("within 3 % of Monte Carlo bounds for pH 6 to 9, 2 to 34 °C and the default uncertainties");
+
+    private static final double Z = METHOD.values()[0];
+    private static final double FRESH_PKA = METHOD.values()[1];
+    private static final double SALINE_PKA = METHOD.values()[2];
+    private static final double LN_10 = StrictMath.log(10);
+    private static final double STEP_C = 0.01;
+
+    private AmmoniaUncertainty() {}
+
+    /**
+     * Standard uncertainties of what is measured.
+     *
+     * @param tan of total ammonia, relative
+     * @param ph of pH
+     * @param temperatureC of temperature, °C
+     */
+    public record Sensors(double tan, double ph, double temperatureC) {}
+
+    /** Relative standard uncertainty of un-ionized ammonia, or of the limit of total ammonia against a measured one. */
+    public static double relative(Water water, AmmoniaDissociation dissociation, Sensors sensors) {
+        double fraction = dissociation.fraction(water.ph(), water.temperatureC(), water.salinity(), water.scale());
+        double k = LN_10 * (1 - fraction);
+        double constant = pKa(water.salinity());
+        double drift = slope(water, dissociation) * sensors.temperatureC();
+        return StrictMath.sqrt(sensors.tan() * sensors.tan()
+                + k * k * (sensors.ph() * sensors.ph() + constant * constant + drift * drift));
+    }
+
+    /** Standard uncertainty of the dissociation constant at a practical salinity. */
+    public static double pKa(double salinity) {
+        return salinity > AmmoniaMethod.FRESH_SALINITY ? SALINE_PKA : FRESH_PKA;
+    }
+
+    /** The factor by which the upper bound of 95 % lies above, and the lower below. */
+    public static double factor(double relative) {
+        return StrictMath.exp(Z * relative);
+    }
+
+    private static double slope(Water water, AmmoniaDissociation dissociation) {
+        double above = dissociation.pKa(water.temperatureC() + STEP_C, water.salinity(), water.scale());
+        double below = dissociation.pKa(water.temperatureC() - STEP_C, water.salinity(), water.scale());
+        return (above - below) / (2 * STEP_C);
+    }
+}
