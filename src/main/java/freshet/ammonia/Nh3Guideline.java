@@ -3,7 +3,6 @@ package freshet.ammonia;
 import freshet.method.Citation;
 import freshet.method.Constant;
 import freshet.method.Method;
-import freshet.method.Range;
 import freshet.method.Seen;
 import freshet.method.Validity;
 import freshet.substance.Basis;
@@ -69,7 +68,7 @@ public enum Nh3Guideline {
                 .equation(
                         "limit of un-ionized ammonia, as NH3; as N multiply by 14.007/17.031",
                         new Constant("limit as NH3", nh3MgPerL, "mg/L"))
-                .within(Applied.PH, Applied.TEMPERATURE)
+                .within(ReceivingWater.PH, ReceivingWater.TEMPERATURE)
                 .accuracy(accuracy)
                 .errata("printed as NH3: read as N it is 22 % too high");
     }
@@ -96,13 +95,7 @@ public enum Nh3Guideline {
 
     /** Whether pH and temperature (°C) lie where such limits are applied to receiving waters. */
     public Validity validity(double ph, double temperatureC) {
-        return Validity.of(Applied.PH, ph).and(Applied.TEMPERATURE, temperatureC);
-    }
-
-    /** Where such limits are applied; an enumeration cannot have its constants before its own members. */
-    private static final class Applied {
-        static final Range PH = new Range("ph", 6.5, 9, "[pH]");
-        static final Range TEMPERATURE = new Range("temperature_c", 0, 30, "Cel");
+        return Validity.of(ReceivingWater.PH, ph).and(ReceivingWater.TEMPERATURE, temperatureC);
     }
 
     private static final class EuropeanDirective {
@@ -111,7 +104,8 @@ public enum Nh3Guideline {
                         + " fresh waters needing protection or improvement in order to support fish life, Annex I";
     }
 
-    private static final class SaltWaterCriteria {
+    /** The source of the salt-water criteria. */
+    static final class SaltWaterCriteria {
         static final String FULL =
                 "US Environmental Protection Agency (1989) Ambient water quality criteria for ammonia"
                         + " (saltwater). EPA 440/5-88-004. Washington DC";

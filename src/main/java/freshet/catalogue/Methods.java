@@ -6,6 +6,8 @@ import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.AmmoniaUncertainty;
 import freshet.ammonia.LimitTable;
 import freshet.ammonia.Nh3Guideline;
+import freshet.ammonia.TanGuideline;
+import freshet.ammonia.UsEpa1989Dissociation;
 import freshet.carbonate.AlkalinityDose;
 import freshet.carbonate.CarbonateSystem;
 import freshet.carbonate.Davies1962;
@@ -69,6 +71,8 @@ final class Methods {
                             ChlorideProtection.METHOD,
                             ChlorideRatios.METHOD,
                             SaltDose.METHOD),
+                    of(TanGuideline.values(), choice -> choice.criterion().method()),
+                    Stream.of(UsEpa1989Dissociation.METHOD),
                     of(LoadMethod.values(), LoadMethod::method),
                     of(Stoichiometry.values(), Stoichiometry::method),
                     Stream.of(Ration.METHOD, BiofilterCapacity.METHOD, BiofilterSizing.METHOD),

@@ -30,7 +30,9 @@ class QuantityContractTest {
             "carbon_to_nitrogen",
             "feed_conversion_ratio",
             "reference_salinity",
-            "calcite_saturation_index");
+            "calcite_saturation_index",
+            "acute_quotient",
+            "chronic_quotient");
 
     @Autowired
     private Calculations calculations;

@@ -5,6 +5,8 @@ import freshet.ammonia.AmmoniaSpeciation;
 import freshet.ammonia.AmmoniaUncertainty;
 import freshet.ammonia.LimitTable;
 import freshet.ammonia.Nh3Guideline;
+import freshet.ammonia.TanGuideline;
+import freshet.ammonia.UsEpa1989Dissociation;
 import freshet.answer.Answer;
 import freshet.http.Calculation;
 import freshet.http.binding.Controls.Format;
@@ -23,6 +25,12 @@ class AmmoniaCalculations {
 
     private static final List<Method> DISSOCIATION_METHODS = Arrays.stream(AmmoniaMethod.values())
             .map(choice -> choice.dissociation().method())
+            .toList();
+
+    private static final List<Method> CRITERIA_METHODS = Stream.concat(
+                    Arrays.stream(TanGuideline.values())
+                            .map(choice -> choice.criterion().method()),
+                    Stream.of(UsEpa1989Dissociation.METHOD))
             .toList();
 
     @Bean
@@ -75,6 +83,24 @@ class AmmoniaCalculations {
                 .shownBy("nh3_n_limit_mg_per_l=0.02&ph_min=7&ph_max=8.5&ph_step=0.5&temperature_min_c=10"
                         + "&temperature_max_c=30&temperature_step_c=10")
                 .readOnly(Map.of(Format.C, LimitTableHeader::of, Format.CSV, LimitTableHeader::csv));
+    }
+
+    @Bean
+    Calculation<AmmoniaCriteriaRequest, AmmoniaCriteriaResponse> ammoniaCriteria() {
+        return Calculation.of(
+                        "ammonia/criteria",
+                        AmmoniaCriteriaRequest.class,
+                        AmmoniaCriteriaResponse.class,
+                        CriteriaAnswer::to)
+                .describedAs(
+                        "Which total ammonia published criteria allow in receiving waters, over which average",
+                        "Criteria protect wild animals in receiving waters: fresh-water mussels, salmonids and early life"
+                                + " stages of fish (usepa-2013), fish (usepa-1999), sea animals (usepa-1989-saltwater)."
+                                + " They are averages that may be exceeded once in three years, for one pH and one"
+                                + " temperature; a single reading is no average. They are not advice for a culture tank and"
+                                + " not a permit: local codes decide.")
+                .using(CRITERIA_METHODS)
+                .shownBy("guideline=usepa-2013&ph=7.8&temperature_c=18&tan_mg_per_l=0.9");
     }
 
     private static Answer<AmmoniaSpeciationResponse> speciation(AmmoniaSpeciationRequest request) {

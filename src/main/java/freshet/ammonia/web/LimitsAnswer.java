@@ -48,7 +48,8 @@ final class LimitsAnswer {
                         "guideline-for-other-water",
                         "nh3_guideline",
                         guideline.method().id() + " is for " + (guideline.forSaltWater() ? "salt" : "fresh")
-                                + " water, and salinity is " + SixDigits.text(request.sample().salinity()) + "."));
+                                + " water, and salinity is "
+                                + SixDigits.text(request.sample().salinity()) + "."));
             }
         }
         notices.add(new Notice(
