@@ -1,6 +1,5 @@
 package freshet.farm;
 
-import freshet.acidity.PhScale;
 import freshet.ammonia.AmmoniaDissociation;
 import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.AmmoniaUncertainty;
@@ -9,6 +8,7 @@ import freshet.method.Citation;
 import freshet.method.Constant;
 import freshet.method.Method;
 import freshet.method.Seen;
+import java.util.OptionalDouble;
 
 /**
  * How far inside its limit an alarm is set, so that the limit is kept with 95 % although the sensors are uncertain.
@@ -99,13 +99,8 @@ public final class GuardBand {
     }
 
     /** The temperature at which it would be, °C; empty where that is outside -2 to 60 °C. */
-    public java.util.OptionalDouble temperatureAt(double fraction) {
+    public OptionalDouble temperatureAt(double fraction) {
         double wanted = water.ph() + StrictMath.log10(1 / fraction - 1);
         return dissociation.temperatureAt(wanted, water.salinity(), water.scale());
-    }
-
-    /** The scale of pH. */
-    public PhScale scale() {
-        return water.scale();
     }
 }

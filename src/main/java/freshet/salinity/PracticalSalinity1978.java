@@ -6,6 +6,7 @@ import freshet.method.Method;
 import freshet.method.Range;
 import freshet.method.Seen;
 import freshet.method.Validity;
+import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
 
 /**
  * Practical salinity from conductivity at the surface, PSS-78, with the extension to low salinity.
@@ -127,7 +128,6 @@ public final class PracticalSalinity1978 {
 
     /** The ratio at which the scale gives 2. */
     private double ratioOfLow(double t) {
-        return new org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver(1e-15, 1e-15, 0, 5)
-                .solve(100, r -> scale(r, t) - LOW, 0.02, 0.15);
+        return new BracketingNthOrderBrentSolver(1e-15, 1e-15, 0, 5).solve(100, r -> scale(r, t) - LOW, 0.02, 0.15);
     }
 }

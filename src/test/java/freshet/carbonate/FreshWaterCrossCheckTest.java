@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import freshet.PublishedTable;
 import freshet.PublishedTable.Row;
 import freshet.acidity.PhScale;
+import freshet.acidity.SeaSalt;
 import java.util.List;
 import java.util.Map;
 import org.assertj.core.data.Percentage;
@@ -86,7 +87,7 @@ class FreshWaterCrossCheckTest {
     void theServiceAgreesWithTheModelInDiluteWater() {
         for (double t = 10; t <= 25; t += 5) {
             for (double s : new double[] {0.1, 0.5, 1, 2, 5}) {
-                double ionicStrength = freshet.acidity.SeaSalt.ionicStrength(s);
+                double ionicStrength = SeaSalt.ionicStrength(s);
                 for (double ph = 6.5; ph <= 7.5; ph += 0.5) {
                     double alkalinity = 2e-3;
                     double co2 = CarbonateSolver.of(t, s, PhScale.NBS, 0)

@@ -7,6 +7,7 @@ import de.siegmar.fastcsv.reader.CsvReader;
 import de.siegmar.fastcsv.reader.NamedCsvRecord;
 import freshet.http.binding.Input;
 import io.restassured.response.Response;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -151,7 +152,7 @@ class SeriesContractTest {
                 .urlEncodingEnabled(false)
                 .contentType(type)
                 .accept("*/*")
-                .body(body.getBytes(java.nio.charset.StandardCharsets.UTF_8))
+                .body(body.getBytes(StandardCharsets.UTF_8))
                 .post(calculation.seriesAddress() + query);
     }
 

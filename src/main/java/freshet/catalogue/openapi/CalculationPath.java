@@ -15,6 +15,7 @@ import io.swagger.v3.oas.models.parameters.RequestBody;
 import io.swagger.v3.oas.models.responses.ApiResponse;
 import io.swagger.v3.oas.models.responses.ApiResponses;
 import java.util.Map;
+import java.util.TreeMap;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 
@@ -82,7 +83,7 @@ final class CalculationPath {
                                 method.id(),
                                 "reference",
                                 method.citation().reference()))
-                        .map(java.util.TreeMap::new)
+                        .map(TreeMap::new)
                         .toList());
         return operation;
     }

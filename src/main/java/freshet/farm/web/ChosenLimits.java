@@ -9,6 +9,7 @@ import freshet.farm.LimitPair;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import org.jspecify.annotations.Nullable;
 
 /** The limits of a request: those of a profile, or the caller's own. */
 record ChosenLimits(
@@ -28,8 +29,7 @@ record ChosenLimits(
         this(request.profile(), request.own(), request.variables());
     }
 
-    private ChosenLimits(
-            @org.jspecify.annotations.Nullable AlarmProfile profile, OwnLimits own, List<AlarmVariable> variables) {
+    private ChosenLimits(@Nullable AlarmProfile profile, OwnLimits own, List<AlarmVariable> variables) {
         this(
                 profile == null ? own.ammonia() : profile.ammonia(),
                 profile == null ? own.nitrite() : profile.nitrite(),

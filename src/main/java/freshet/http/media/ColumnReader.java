@@ -9,6 +9,7 @@ import java.lang.invoke.MethodType;
 import java.lang.reflect.Method;
 import java.lang.reflect.ParameterizedType;
 import java.lang.reflect.RecordComponent;
+import java.lang.reflect.Type;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Optional;
@@ -58,7 +59,7 @@ final class ColumnReader {
     }
 
     private static Kind listKind(RecordComponent component) {
-        java.lang.reflect.Type element = ((ParameterizedType) component.getGenericType()).getActualTypeArguments()[0];
+        Type element = ((ParameterizedType) component.getGenericType()).getActualTypeArguments()[0];
         return element == Double.class ? Kind.NUMBERS : element instanceof ParameterizedType ? Kind.MATRIX : Kind.ROWS;
     }
 

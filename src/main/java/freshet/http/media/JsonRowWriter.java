@@ -6,6 +6,7 @@ import freshet.http.problem.Problem;
 import freshet.http.problem.ProblemRenderer;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /** JSON objects, one on each line; as items of one object or each for itself. */
@@ -37,7 +38,7 @@ final class JsonRowWriter implements RowWriter {
             JsonText.key(name, key);
             boolean isResult = table.columnNames(List.of("validity", "notice_codes", "error"))
                     .contains(name);
-            keys.add(isResult ? new byte[0] : java.util.Arrays.copyOf(key.array(), key.length()));
+            keys.add(isResult ? new byte[0] : Arrays.copyOf(key.array(), key.length()));
         }
         if (asItems) {
             out.put(START);
