@@ -16,7 +16,10 @@ import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
 public final class CarbonateSolver {
 
     private static final int MOST_EVALUATIONS = 60;
-    private static final double PH_ACCURACY = 1e-13;
+    private static final double PH_ACCURACY = 1e-12;
+    /** eq/kg; in the least buffered water 5e-10 in pH. */
+    private static final double ALKALINITY_ACCURACY = 1e-16;
+
     private static final double FOURTH = 4;
     private static final double HIGHEST_PH = 14;
 
@@ -179,7 +182,7 @@ public final class CarbonateSolver {
     }
 
     private static double root(UnivariateFunction excess, double lowestPh, double highestPh) {
-        return new BracketingNthOrderBrentSolver(PH_ACCURACY, PH_ACCURACY, 0, 5)
+        return new BracketingNthOrderBrentSolver(PH_ACCURACY, PH_ACCURACY, ALKALINITY_ACCURACY, 5)
                 .solve(MOST_EVALUATIONS, excess, lowestPh, highestPh);
     }
 
