@@ -85,8 +85,9 @@ public final class LimitTable {
      * Makes a table.
      *
      * @param nh3NLimitMgPerL limit of un-ionized ammonia as N, mg/L
-     * @param salinity practical salinity
-     * @param scale scale of pH
+     * @param grid where the nodes stand
+     * @param dissociation the constant to compute with
+     * @param water salinity and pH scale that the table holds for
      */
     public LimitTable(double nh3NLimitMgPerL, Grid grid, AmmoniaDissociation dissociation, SaltWater water) {
         this.nh3NLimitMgPerL = nh3NLimitMgPerL;

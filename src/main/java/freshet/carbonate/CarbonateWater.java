@@ -39,11 +39,6 @@ public record CarbonateWater(
         return own + share * (other - own);
     }
 
-    /** The same water with other inorganic carbon, mol/kg. */
-    public CarbonateWater withInorganicCarbon(double molPerKg) {
-        return new CarbonateWater(temperatureC, salinity, alkalinity, molPerKg, tan);
-    }
-
     /** The equilibrium of this water, with pH on {@code scale}. */
     public CarbonateState state(PhScale scale) {
         CarbonateSolver solver = new CarbonateSolver(AcidBase.of(temperatureC, salinity), scale, tan);

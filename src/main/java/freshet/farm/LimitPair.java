@@ -37,15 +37,6 @@ public record LimitPair(OptionalDouble caution, OptionalDouble critical) {
                 : of(critical.getAsDouble() + distance, critical.getAsDouble());
     }
 
-    /** With neither limit above {@code most}. */
-    public LimitPair atMost(double most) {
-        return new LimitPair(capped(caution, most), capped(critical, most));
-    }
-
-    private static OptionalDouble capped(OptionalDouble limit, double most) {
-        return limit.isPresent() ? OptionalDouble.of(Math.min(limit.getAsDouble(), most)) : limit;
-    }
-
     /** Both limits times {@code factor}. */
     public LimitPair times(double factor) {
         return new LimitPair(times(caution, factor), times(critical, factor));

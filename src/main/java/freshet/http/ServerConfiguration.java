@@ -11,6 +11,7 @@ import org.springframework.context.annotation.Configuration;
 @Configuration(proxyBeanMethods = false)
 class ServerConfiguration {
 
+    /** Tomcat writes 8 KiB at a time; a series is written in parts of 32 KiB. */
     @Bean
     WebServerFactoryCustomizer<TomcatServletWebServerFactory> largerWrites() {
         return factory ->

@@ -28,7 +28,10 @@ class AmmoniaUncertaintyTest {
         assertThat(withOther).isCloseTo(0.126, within(0.0005));
     }
 
-    /** JCGM 101:2008, seeded; over the profiles' ranges of pH and temperature; the error of a kit is a share of its reading. */
+    /**
+     * JCGM 101:2008, seeded; over the profiles' ranges of pH and temperature. The error of a kit is taken as a share of its
+     * reading; with a normal one the upper bound at pH 9 and 34 °C differs by 3.14 %.
+     */
     @ParameterizedTest
     @CsvSource({
         "6, 2, 0",

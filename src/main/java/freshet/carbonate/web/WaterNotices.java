@@ -1,6 +1,7 @@
 package freshet.carbonate.web;
 
 import freshet.acidity.PhScale;
+import freshet.ammonia.AmmoniaMethod;
 import freshet.answer.Notice;
 import java.util.ArrayList;
 import java.util.List;
@@ -9,26 +10,25 @@ import org.jspecify.annotations.Nullable;
 /** What the reader must know of a pH and a salinity that the carbonate system was solved with. */
 final class WaterNotices {
 
-    private static final double FRESH = 0.5;
     private static final double HARD_MG_PER_L = 100;
 
     private WaterNotices() {}
 
     static List<Notice> of(double salinity, @Nullable PhScale scale, double alkalinityMgPerL) {
         List<Notice> notices = new ArrayList<>(2);
-        if (salinity > FRESH && scale == null) {
+        if (salinity > AmmoniaMethod.FRESH_SALINITY && scale == null) {
             notices.add(new Notice(
                     "ph-scale-assumed-nbs",
                     "ph_scale",
                     "ph was taken as a reading of a probe on NBS or IUPAC buffers."));
         }
-        if (salinity > FRESH && (scale == null || scale == PhScale.NBS)) {
+        if (salinity > AmmoniaMethod.FRESH_SALINITY && (scale == null || scale == PhScale.NBS)) {
             notices.add(new Notice(
                     "nbs-in-saline-water",
                     "ph",
                     "In brackish water such a probe is uncertain by 0.1 in pH, CO2 by 26 %; NH3 from it reads high."));
         }
-        if (salinity < FRESH && alkalinityMgPerL > HARD_MG_PER_L) {
+        if (salinity < AmmoniaMethod.FRESH_SALINITY && alkalinityMgPerL > HARD_MG_PER_L) {
             notices.add(new Notice(
                     "ionic-strength-unknown",
                     "salinity",

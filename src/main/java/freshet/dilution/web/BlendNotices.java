@@ -1,6 +1,7 @@
 package freshet.dilution.web;
 
 import freshet.acidity.PhScale;
+import freshet.ammonia.AmmoniaMethod;
 import freshet.answer.Notice;
 import freshet.dilution.Blend;
 import java.util.ArrayList;
@@ -14,7 +15,6 @@ final class BlendNotices {
     private static final double CHLORINE_MG_PER_L = 0.003;
     private static final double HARD_PH_LIMIT = 0.5;
     private static final double HARD_TEMPERATURE_LIMIT_C = 5;
-    private static final double FRESH = 0.5;
     private static final double HARD_WATER_MG_PER_L = 100;
     private static final double ROUNDING = 1e-9;
 
@@ -127,13 +127,13 @@ final class BlendNotices {
 
     private void salt() {
         double most = Math.max(request.tank().salinity(), request.source().salinity());
-        if (most > FRESH && request.phScale() == null) {
+        if (most > AmmoniaMethod.FRESH_SALINITY && request.phScale() == null) {
             note(
                     "ph-scale-assumed-nbs",
                     "ph_scale",
                     "Every ph was taken as a reading of a probe on NBS or IUPAC buffers.");
         }
-        if (most > FRESH && request.scale() == PhScale.NBS) {
+        if (most > AmmoniaMethod.FRESH_SALINITY && request.scale() == PhScale.NBS) {
             note(
                     "nbs-in-saline-water",
                     "ph",
@@ -148,7 +148,8 @@ final class BlendNotices {
     }
 
     private static boolean hard(WaterSample sample) {
-        return sample.salinity() < FRESH && sample.alkalinityMgPerLAsCaco3() > HARD_WATER_MG_PER_L;
+        return sample.salinity() < AmmoniaMethod.FRESH_SALINITY
+                && sample.alkalinityMgPerLAsCaco3() > HARD_WATER_MG_PER_L;
     }
 
     private void note(String code, String field, String detail) {

@@ -11,6 +11,7 @@ import freshet.quantity.Salinity;
 import freshet.quantity.Temperature;
 import freshet.quantity.TotalAmmonia;
 import freshet.quantity.Volume;
+import freshet.substance.MolarMass;
 import jakarta.validation.constraints.NotNull;
 import org.jspecify.annotations.Nullable;
 
@@ -34,7 +35,7 @@ record WaterSample(
         Double chloramineMgPerLAsCl2) {
 
     /** Ammonia as N that chloramine sets free, g for each g as Cl2: one N for each Cl2. */
-    private static final double N_PER_CL2 = 14.007 / 70.906;
+    private static final double N_PER_CL2 = MolarMass.NITROGEN / 70.906;
 
     static double zeroIfNone(@Nullable Double value) {
         return value == null ? 0 : value;

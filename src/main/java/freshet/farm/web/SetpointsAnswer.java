@@ -1,5 +1,6 @@
 package freshet.farm.web;
 
+import freshet.ammonia.AmmoniaMethod;
 import freshet.ammonia.Water;
 import freshet.answer.Answer;
 import freshet.answer.Notice;
@@ -16,6 +17,9 @@ import java.util.OptionalDouble;
 final class SetpointsAnswer {
 
     private static final OptionalDouble NONE = OptionalDouble.empty();
+    /** How far a caution limit lies inside a critical one that neither profile nor caller has paired with it. */
+    private static final double CAUTION_SHARE = 0.8;
+
     private static final double CAUTION_INSIDE_PH = 0.2;
 
     private final AlarmSetpointsRequest request;
@@ -128,7 +132,7 @@ final class SetpointsAnswer {
                 double c = sensors.chlorideRelativeStandardUncertaintyPercent() / 100;
                 return concentration(
                         AlarmVariable.NO2_N,
-                        LimitPair.of(Math.min(pair.caution().orElse(bound), 0.8 * bound), bound),
+                        LimitPair.of(Math.min(pair.caution().orElse(bound), CAUTION_SHARE * bound), bound),
                         StrictMath.sqrt(r * r + c * c));
             }
         } else if (chloride != null) {
@@ -221,7 +225,7 @@ final class SetpointsAnswer {
                     "For this pH and temperature: ask again at the refresh values, at half of each if both drift."));
         }
         Sample sample = request.sample();
-        if (sample.salinity() > 0.5 && sample.phScale() == null) {
+        if (sample.salinity() > AmmoniaMethod.FRESH_SALINITY && sample.phScale() == null) {
             notices.add(new Notice(
                     "ph-scale-assumed-nbs",
                     "ph_scale",

@@ -24,7 +24,7 @@ public final class SixDigits {
 
     static {
         for (int i = 0; i < EXPONENTS.length; i++) {
-            EXPONENTS[i] = (int) Math.floor((i + LEAST_BINARY_EXPONENT) * Math.log10(2));
+            EXPONENTS[i] = (int) Math.floor((i + LEAST_BINARY_EXPONENT) * StrictMath.log10(2));
         }
         for (int i = 0; i < POWERS.length; i++) {
             POWERS[i] = Double.parseDouble("1e" + i);
