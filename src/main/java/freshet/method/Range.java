@@ -21,4 +21,12 @@ public record Range(String quantity, double minimum, double maximum, String unit
     public boolean contains(double value) {
         return value >= minimum && value <= maximum;
     }
+
+    /** Whether this is a range of the same quantity that reaches no farther than {@code other}. */
+    boolean liesWithin(Range other) {
+        return quantity.equals(other.quantity)
+                && unit.equals(other.unit)
+                && minimum >= other.minimum
+                && maximum <= other.maximum;
+    }
 }

@@ -28,7 +28,7 @@ public record Validity(List<Range> exceeded) {
         return and(of(range, value));
     }
 
-    /** Both this and {@code other}. */
+    /** Both this and {@code other}; of ranges that lie within each other only the narrowest is kept. */
     public Validity and(Validity other) {
         if (other.within()) {
             return this;
@@ -38,11 +38,18 @@ public record Validity(List<Range> exceeded) {
         }
         List<Range> both = new ArrayList<>(exceeded);
         both.addAll(other.exceeded);
-        return new Validity(both);
+        return new Validity(narrowest(both));
     }
 
     /** Whether no range is exceeded. */
     public boolean within() {
         return exceeded.isEmpty();
+    }
+
+    private static List<Range> narrowest(List<Range> ranges) {
+        return ranges.stream()
+                .distinct()
+                .filter(range -> ranges.stream().noneMatch(other -> !other.equals(range) && other.liesWithin(range)))
+                .toList();
     }
 }
