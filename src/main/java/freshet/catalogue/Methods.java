@@ -37,6 +37,7 @@ import freshet.nitrite.NitrousAcidInhibition;
 import freshet.nitrite.SaltDose;
 import freshet.oxygen.BensonKrause1984;
 import freshet.oxygen.StandardAtmosphere1976;
+import freshet.salinity.Hill1986;
 import freshet.salinity.MilleroPoisson1981;
 import freshet.salinity.PracticalSalinity1978;
 import java.util.Arrays;
@@ -62,7 +63,7 @@ final class Methods {
                             AmmoniaUncertainty.METHOD),
                     of(AlarmProfile.values(), AlarmProfile::method),
                     Stream.of(BensonKrause1984.METHOD, StandardAtmosphere1976.METHOD),
-                    Stream.of(PracticalSalinity1978.METHOD, MilleroPoisson1981.METHOD),
+                    Stream.of(PracticalSalinity1978.METHOD, Hill1986.METHOD, MilleroPoisson1981.METHOD),
                     of(AmmoniaMethod.values(), choice -> choice.dissociation().method()),
                     of(Nh3Guideline.values(), Nh3Guideline::method),
                     of(NitriteMethod.values(), choice -> choice.dissociation().method()),

@@ -11,10 +11,9 @@ import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
 /**
  * Practical salinity from conductivity at the surface, PSS-78, with the extension to low salinity.
  *
- * <p>UNESCO (1981); Fofonoff N.P., Millard R.C. (1983) Algorithms for computation of fundamental properties of seawater.
- * UNESCO Tech. Pap. Mar. Sci. 44; salinity 2-42, -2 to 35 °C. Below 2: Hill K.D., Dauphinee T.M., Woods D.J. (1986) The
- * extension of the Practical Salinity Scale 1978 to low salinities. IEEE J. Ocean. Eng. 11:109-112,
- * doi:10.1109/JOE.1986.1145154, scaled so that both meet at 2. Temperature on the scale of 1968.
+ * <p>UNESCO (1981) Background papers and supporting data on the Practical Salinity Scale 1978. UNESCO Tech. Pap. Mar. Sci.
+ * 37; Fofonoff N.P., Millard R.C. (1983) Algorithms for computation of fundamental properties of seawater. UNESCO Tech.
+ * Pap. Mar. Sci. 44. Salinity 2-42, -2 to 35 °C; below 2 after {@link Hill1986}. Temperature on the scale of 1968.
  */
 public final class PracticalSalinity1978 {
 
@@ -33,9 +32,8 @@ public final class PracticalSalinity1978 {
                             "10.1109/JOE.1986.1145154"),
                     Seen.SECONDARY)
             .equation(
-                    "r = C/C(35, 15) / sum(c_i t^i); S = sum(a_i r^(i/2)) + (t - 15)/(1 + k (t - 15)) sum(b_i r^(i/2));"
-                            + " below 2: S - a0/(1 + 1.5 x + x^2) - b0 f/(1 + y^0.5 + y + y^1.5), x = 400 r, y = 100 r,"
-                            + " times 2 over its value where S = 2; t = 1.00024 t(1990)",
+                    "r = C/C(35, 15) / sum(c_i t^i); S = sum(a_i r^(i/2)) + f sum(b_i r^(i/2)), f = (t - t0)/(1 + k (t - t0));"
+                            + " t = q t(1990); below 2 continued by hill-1986; density beside it by millero-poisson-1981",
                     new Constant("C(35, 15)", 42.914, "mS/cm"),
                     new Constant("c0", 0.6766097, "1"),
                     new Constant("c1", 2.00564e-2, "Cel-1"),
@@ -54,39 +52,41 @@ public final class PracticalSalinity1978 {
                     new Constant("b3", -0.0375, "1"),
                     new Constant("b4", 0.0636, "1"),
                     new Constant("b5", -0.0144, "1"),
-                    new Constant("k", 0.0162, "Cel-1"))
+                    new Constant("k", 0.0162, "Cel-1"),
+                    new Constant("t0", 15, "Cel"),
+                    new Constant("q", 1.00024, "1", "the scale of 1968 over that of 1990"))
             .within(TEMPERATURE, SALINITY)
             .accuracy(
                     "the check values of UNESCO Technical Paper 44 are reproduced to the print; for sea salt: water whose"
                             + " salt is another gets an index only")
-            .errata("two copies print 29.995347 for the check value 27.995347");
+            .errata("two copies print 29.995347 for the check value 27.995347")
+            .uses(Hill1986.METHOD, MilleroPoisson1981.METHOD);
 
-    private static final double SCALE_1968 = 1.00024;
-    private static final double REFERENCE_C = 15;
-    private static final double LOW = 2;
     private static final int ROOTS = 6;
 
     private final double[] c;
+    private final Hill1986 low;
 
-    PracticalSalinity1978(double[] constants) {
+    PracticalSalinity1978(double[] constants, Hill1986 low) {
         c = constants;
+        this.low = low;
     }
 
     /** With the published constants. */
     public static PracticalSalinity1978 published() {
-        return new PracticalSalinity1978(METHOD.values());
+        return new PracticalSalinity1978(METHOD.values(), new Hill1986(Hill1986.METHOD.values()));
     }
 
     /**
-     * Practical salinity.
+     * Practical salinity, never negative; beyond 42 the scale is drawn out.
      *
-     * @param conductivity mS/cm at {@code temperatureC}
+     * @param conductivityMsPerCm conductivity at {@code temperatureC}, mS/cm, not compensated
      * @param temperatureC °C
      */
-    public double salinity(double conductivity, double temperatureC) {
-        double t = temperatureC * SCALE_1968;
+    public double salinity(double conductivityMsPerCm, double temperatureC) {
+        double t = temperatureC * c[20];
         double temperatureRatio = c[1] + t * (c[2] + t * (c[3] + t * (c[4] + t * c[5])));
-        return ofRatio(conductivity / c[0] / temperatureRatio, t);
+        return ofRatio(conductivityMsPerCm / c[0] / temperatureRatio, t);
     }
 
     /** Whether temperature in °C and the salinity found lie within the ranges of the scale. */
@@ -97,11 +97,11 @@ public final class PracticalSalinity1978 {
     /** From the ratio of conductivities at the same temperature, °C of 1968, and at the surface. */
     double ofRatio(double ratio, double t) {
         double salinity = scale(ratio, t);
-        if (salinity >= LOW) {
+        if (salinity >= low.joint()) {
             return salinity;
         }
-        double joint = ratioOfLow(t);
-        return Math.max(0, extended(salinity, ratio, t) * LOW / extended(LOW, joint, t));
+        double atJoint = continued(low.joint(), ratioAtJoint(t), t);
+        return Math.max(0, continued(salinity, ratio, t) * low.joint() / atJoint);
     }
 
     private double scale(double ratio, double t) {
@@ -115,19 +115,17 @@ public final class PracticalSalinity1978 {
         return a + warmth(t) * b;
     }
 
-    private double extended(double salinity, double ratio, double t) {
-        double x = 400 * ratio;
-        double y = 100 * ratio;
-        double root = StrictMath.sqrt(y);
-        return salinity - c[6] / (1 + 1.5 * x + x * x) - c[12] * warmth(t) / (1 + root + y + y * root);
+    private double continued(double salinity, double ratio, double t) {
+        return low.continued(salinity, ratio, c[6], c[12] * warmth(t));
     }
 
     private double warmth(double t) {
-        return (t - REFERENCE_C) / (1 + c[18] * (t - REFERENCE_C));
+        return (t - c[19]) / (1 + c[18] * (t - c[19]));
     }
 
-    /** The ratio at which the scale gives 2. */
-    private double ratioOfLow(double t) {
-        return new BracketingNthOrderBrentSolver(1e-15, 1e-15, 0, 5).solve(100, r -> scale(r, t) - LOW, 0.02, 0.15);
+    /** The ratio at which the scale gives the salinity where both meet. */
+    private double ratioAtJoint(double t) {
+        return new BracketingNthOrderBrentSolver(1e-15, 1e-15, 0, 5)
+                .solve(100, ratio -> scale(ratio, t) - low.joint(), 0.02, 0.15);
     }
 }

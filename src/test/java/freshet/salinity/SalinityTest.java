@@ -12,6 +12,8 @@ import org.junit.jupiter.params.provider.MethodSource;
 
 class SalinityTest {
 
+    private static final Hill1986 LOW = new Hill1986(Hill1986.METHOD.values());
+
     static List<Row> salinity() {
         return PublishedTable.of("practical-salinity-1978").rows();
     }
@@ -55,9 +57,18 @@ class SalinityTest {
         for (int i = 0; i < PracticalSalinity1978.METHOD.values().length; i++) {
             double[] nudged = PracticalSalinity1978.METHOD.values();
             nudged[i] *= 1.001;
-            PracticalSalinity1978 scale = new PracticalSalinity1978(nudged);
+            PracticalSalinity1978 scale = new PracticalSalinity1978(nudged, LOW);
             assertThat(salinity())
                     .as(PracticalSalinity1978.METHOD.constants().get(i).symbol())
+                    .anyMatch(row -> !row.agrees(value(scale, row)));
+        }
+        for (int i = 0; i < Hill1986.METHOD.values().length; i++) {
+            double[] nudged = Hill1986.METHOD.values();
+            nudged[i] *= 1.001;
+            PracticalSalinity1978 scale =
+                    new PracticalSalinity1978(PracticalSalinity1978.METHOD.values(), new Hill1986(nudged));
+            assertThat(salinity())
+                    .as(Hill1986.METHOD.constants().get(i).symbol())
                     .anyMatch(row -> !row.agrees(value(scale, row)));
         }
         for (int i = 0; i < MilleroPoisson1981.METHOD.values().length; i++) {

@@ -4,6 +4,7 @@ import freshet.answer.Answer;
 import freshet.answer.Notice;
 import freshet.http.Calculation;
 import freshet.method.Validity;
+import freshet.salinity.Hill1986;
 import freshet.salinity.MilleroPoisson1981;
 import freshet.salinity.PracticalSalinity1978;
 import java.util.ArrayList;
@@ -19,21 +20,21 @@ class SalinityCalculations {
     private static final PracticalSalinity1978 SCALE = PracticalSalinity1978.published();
 
     @Bean
-    Calculation<FromConductivityRequest, FromConductivityResponse> salinityFromConductivity() {
+    Calculation<SalinityFromConductivityRequest, SalinityFromConductivityResponse> salinityFromConductivity() {
         return Calculation.of(
                         "salinity/from-conductivity",
-                        FromConductivityRequest.class,
-                        FromConductivityResponse.class,
+                        SalinityFromConductivityRequest.class,
+                        SalinityFromConductivityResponse.class,
                         SalinityCalculations::salinity)
                 .describedAs(
                         "Practical salinity and density from a conductivity meter",
                         "Holds for sea salt. Water whose salt is another, hard well water above all, gets an index only. Say"
                                 + " whether the meter compensates: the difference is about 2 % for each °C.")
-                .using(List.of(PracticalSalinity1978.METHOD, MilleroPoisson1981.METHOD))
+                .using(List.of(PracticalSalinity1978.METHOD, Hill1986.METHOD, MilleroPoisson1981.METHOD))
                 .shownBy("conductivity_ms_per_cm=30&temperature_c=15");
     }
 
-    private static Answer<FromConductivityResponse> salinity(FromConductivityRequest request) {
+    private static Answer<SalinityFromConductivityResponse> salinity(SalinityFromConductivityRequest request) {
         List<Notice> notices = new ArrayList<>(1);
         Double compensated = request.conductivity_25cMsPerCm();
         double t = request.temperatureC();
@@ -51,7 +52,7 @@ class SalinityCalculations {
         }
         Validity validity = PracticalSalinity1978.validity(compensated == null ? t : COMPENSATED_C, salinity);
         return new Answer<>(
-                new FromConductivityResponse(salinity, MilleroPoisson1981.kgPerM3(t, salinity)),
+                new SalinityFromConductivityResponse(salinity, MilleroPoisson1981.kgPerM3(t, salinity)),
                 PracticalSalinity1978.METHOD,
                 validity.and(MilleroPoisson1981.validity(t, salinity)),
                 notices);

@@ -2,7 +2,7 @@ package freshet.salinity.web;
 
 import freshet.quantity.Reported;
 
-record FromConductivityResponse(
+record SalinityFromConductivityResponse(
         @Reported("Practical salinity, PSS-78") double salinity,
 
         @Reported("Density at the temperature of the water and one atmosphere")

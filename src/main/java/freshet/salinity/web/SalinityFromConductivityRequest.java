@@ -7,7 +7,7 @@ import jakarta.validation.constraints.NotNull;
 import org.jspecify.annotations.Nullable;
 
 @ExactlyOneOf({"conductivity_ms_per_cm", "conductivity_25c_ms_per_cm"})
-record FromConductivityRequest(
+record SalinityFromConductivityRequest(
         @Conductivity("Conductivity at the temperature of the water, not compensated") @Nullable
         Double conductivityMsPerCm,
 
