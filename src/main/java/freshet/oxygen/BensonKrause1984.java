@@ -39,7 +39,8 @@ public final class BensonKrause1984 {
             .equation(
                     "ln C = a + b/T + c/T^2 + d/T^3 + e/T^4 - S (f + g/T + h/T^2), mg/L at 1 atm;"
                             + " C(P) = C P (1 - u/P)(1 - o P)/((1 - u)(1 - o)), P in atm; o = i + j t + k t^2;"
-                            + " u = exp(l + m/T + n/T^2) atm; T in K, t in degrees Celsius",
+                            + " u = exp(l + m/T + n/T^2) atm; T in K, t in degrees Celsius;"
+                            + " where only the altitude is known, P by standard-atmosphere-1976",
                     new Constant("a", -139.34411, "1"),
                     new Constant("b", 1.575701e5, "K"),
                     new Constant("c", -6.642308e7, "K2"),
@@ -56,7 +57,8 @@ public final class BensonKrause1984 {
                     new Constant("n", -216961, "K2"))
             .within(TEMPERATURE, SALINITY, PRESSURE)
             .accuracy("±0.1 % as stated by the source; tables of older standards differ by up to 0.4 %")
-            .errata("a textbook table prints 10.3 for 10.03 mg/L at 5 °C and chlorinity 20 g/kg");
+            .errata("a textbook table prints 10.3 for 10.03 mg/L at 5 °C and chlorinity 20 g/kg")
+            .uses(StandardAtmosphere1976.METHOD);
 
     private static final double[] CONSTANTS = METHOD.values();
 
