@@ -29,8 +29,8 @@ public final class AmmoniaUncertainty {
                     new Constant("u(pKa) fresh", 0.005, "1", "salinity to 0.5, without the neglected ionic strength"),
                     new Constant("u(pKa) saline", 0.022, "1", "5 % of K as Clegg and Whitfield 1995 state"))
             .accuracy(
-                    "within 3 % of Monte Carlo bounds for pH 6 to 9, 2 to 34 °C, 0.1 in pH, 0.5 °C and 10 % of total ammonia"
-                            + " taken as a share of the reading; with a normal error of it 3.1 % at pH 9 and 34 °C");
+                    "bounds within 3 % of those by Monte Carlo (JCGM 101, normal errors of 0.1 in pH, 0.5 °C and 10 % of total"
+                            + " ammonia) over the ranges of the alarm profiles; at pH 9 above 28 °C the lower one is 3.1 % high");
 
     private static final double Z = METHOD.values()[0];
     private static final double FRESH_PKA = METHOD.values()[1];

@@ -18,6 +18,7 @@ import freshet.carbonate.PlummerBusenberg1982;
 import freshet.carbonate.ProbeActivity;
 import freshet.carbonate.Takahashi1982;
 import freshet.carbonate.WatersMilleroWoosley2014;
+import freshet.carbonate.Weiss1974;
 import freshet.dilution.Blend;
 import freshet.dilution.DilutionMode;
 import freshet.farm.AlarmProfile;
@@ -54,7 +55,7 @@ final class Methods {
                     Stream.of(Dickson1990.METHOD, DicksonRiley1979.METHOD),
                     Stream.of(CarbonateSystem.METHOD, WatersMilleroWoosley2014.METHOD, Millero1995.METHOD),
                     Stream.of(Dickson1990Borate.METHOD, PlummerBusenberg1982.METHOD, Mucci1983.METHOD),
-                    Stream.of(ProbeActivity.METHOD, Davies1962.METHOD, Takahashi1982.METHOD),
+                    Stream.of(ProbeActivity.METHOD, Davies1962.METHOD, Takahashi1982.METHOD, Weiss1974.METHOD),
                     Stream.of(
                             AlkalinityDose.METHOD,
                             Blend.METHOD,

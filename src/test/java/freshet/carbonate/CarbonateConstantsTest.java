@@ -54,7 +54,8 @@ class CarbonateConstantsTest {
                 new Published(
                         Davies1962.METHOD,
                         (c, row) -> Davies1962.logGamma(c, (int) row.number("z"), row.number("t"), row.number("i"))),
-                new Published(Takahashi1982.METHOD, CarbonateConstantsTest::probe));
+                new Published(Takahashi1982.METHOD, CarbonateConstantsTest::probe),
+                new Published(Weiss1974.METHOD, CarbonateConstantsTest::gas));
     }
 
     /** The form of Dickson 2007 on the total scale has a first constant that is less by 0.0150. */
@@ -73,6 +74,19 @@ class CarbonateConstantsTest {
     private static double probe(double[] c, Row row) {
         double fh = Takahashi1982.activityPerHydrogen(c, row.number("t"), row.number("s"));
         return row.output().equals("ph_sws") ? row.number("ph") + Math.log10(fh) : fh;
+    }
+
+    private static double gas(double[] c, Row row) {
+        double t = row.number("t");
+        return switch (row.output()) {
+            case "ln_k0" -> Weiss1974.lnK0(c, t, row.number("s"));
+            case "delta" -> Weiss1974.delta(c, t);
+            default ->
+                CarbonateSolver.of(t, row.number("s"), PhScale.TOTAL, 0)
+                                .ofPhAndAlkalinity(row.number("ph"), row.number("alk") * 1e-6)
+                                .co2()
+                        / Weiss1974.co2(c, t, row.number("s"), 1e-6);
+        };
     }
 
     static Stream<Arguments> rows() {
@@ -124,6 +138,16 @@ class CarbonateConstantsTest {
         for (double t = 0; t <= 35; t++) {
             assertThat(WatersMilleroWoosley2014.pK1(t, 0)).isCloseTo(-PlummerBusenberg1982.logK1(t), within(0.0015));
             assertThat(WatersMilleroWoosley2014.pK2(t, 0)).isCloseTo(-PlummerBusenberg1982.logK2(t), within(0.002));
+        }
+    }
+
+    /** The independent Henry constant of Plummer and Busenberg 1982. */
+    @Test
+    void freshWaterHoldsAsMuchCarbonDioxideAsAnIndependentSourceSays() {
+        for (double t = 0; t <= 35; t++) {
+            double k = t + 273.15;
+            double henry = 108.3865 + 0.01985076 * k - 6919.53 / k - 40.45154 * Math.log10(k) + 669365 / (k * k);
+            assertThat(Weiss1974.lnK0(Weiss1974.METHOD.values(), t, 0)).isCloseTo(henry * Math.log(10), within(0.005));
         }
     }
 

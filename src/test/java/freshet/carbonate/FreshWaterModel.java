@@ -13,11 +13,14 @@ final class FreshWaterModel {
     private final double kw;
     private final double kn;
     private final double gamma;
+    private final double two;
+    private final double logCalcite;
 
     FreshWaterModel(double temperatureC, double ionicStrength) {
         double t = temperatureC + 273.15;
         gamma = Math.pow(10, Davies1962.logGamma(1, temperatureC, ionicStrength));
-        double two = Math.pow(10, Davies1962.logGamma(2, temperatureC, ionicStrength));
+        two = Math.pow(10, Davies1962.logGamma(2, temperatureC, ionicStrength));
+        logCalcite = PlummerBusenberg1982.logCalcite(temperatureC);
         double neutral = Math.pow(10, 0.1 * ionicStrength);
         k1 = Math.pow(10, PlummerBusenberg1982.logK1(temperatureC)) * neutral / gamma;
         k2 = Math.pow(10, PlummerBusenberg1982.logK2(temperatureC)) * gamma / two;
@@ -40,6 +43,13 @@ final class FreshWaterModel {
     double co2(double ph, double carbon) {
         double h = Math.pow(10, -ph);
         return carbon * h * h / (h * h + k1 * h + k1 * k2);
+    }
+
+    /** Saturation index of calcite. */
+    double saturation(double ph, double alkalinity, double calcium) {
+        double h = Math.pow(10, -ph);
+        double carbonate = carbon(ph, alkalinity) * k1 * k2 / (h * h + k1 * h + k1 * k2);
+        return Math.log10(calcium * two * carbonate * two) - logCalcite;
     }
 
     double ph(double alkalinity, double carbon, double tan) {

@@ -4,6 +4,7 @@ import freshet.ammonia.AmmoniaMethod;
 import freshet.carbonate.AlkalinityDose;
 import freshet.carbonate.CarbonateSystem;
 import freshet.carbonate.Mucci1983;
+import freshet.carbonate.Weiss1974;
 import freshet.http.Calculation;
 import java.util.List;
 import org.springframework.context.annotation.Bean;
@@ -25,7 +26,7 @@ class CarbonateCalculations {
                                 + " inorganic carbon",
                         "An error of 0.1 in pH is an error of 26 % in carbon dioxide; below pH 6 or 10 mg/L of alkalinity"
                                 + " what is derived from pH is uncertain. Measure carbon dioxide where fish depend on it.")
-                .using(List.of(CarbonateSystem.METHOD, Mucci1983.METHOD))
+                .using(List.of(CarbonateSystem.METHOD, Mucci1983.METHOD, Weiss1974.METHOD))
                 .shownBy("ph=7.2&alkalinity_mg_per_l_as_caco3=120&temperature_c=15&calcium_mg_per_l=40");
     }
 
@@ -42,6 +43,7 @@ class CarbonateCalculations {
                         AlkalinityDose.METHOD,
                         CarbonateSystem.METHOD,
                         Mucci1983.METHOD,
+                        Weiss1974.METHOD,
                         AmmoniaMethod.EMERSON_1975.dissociation().method(),
                         AmmoniaMethod.CLEGG_WHITFIELD_1995.dissociation().method()))
                 .shownBy("volume_l=10000&ph=7&temperature_c=25&alkalinity_mg_per_l_as_caco3=40&tan_mg_per_l=1"

@@ -7,6 +7,7 @@ import freshet.answer.Notice;
 import freshet.carbonate.AlkalinityDose;
 import freshet.carbonate.CarbonateState;
 import freshet.carbonate.CarbonateSystem;
+import freshet.carbonate.Weiss1974;
 import freshet.quantity.Sample;
 import java.util.ArrayList;
 import java.util.List;
@@ -90,6 +91,12 @@ final class DoseAnswer {
         }
         notices.addAll(calciteNotices(dose));
         notices.addAll(WaterNotices.of(sample.salinity(), sample.phScale(), request.alkalinityMgPerLAsCaco3()));
+        if (Weiss1974.farBelowAir(plan.settledCo2(), sample.temperatureC(), sample.salinity())) {
+            notices.add(new Notice(
+                    "settled-co2-below-air",
+                    "settled_co2_mg_per_l",
+                    "Less than half of what outdoor air leaves in water: pH and NH3 will settle lower than shown."));
+        }
         return notices;
     }
 

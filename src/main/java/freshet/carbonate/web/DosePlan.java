@@ -135,9 +135,13 @@ final class DosePlan {
 
     /** The equilibrium when carbon dioxide is what it was before, or what the caller says. */
     CarbonateState settled(double dose) {
+        return chemistry.settled(dose, settledCo2());
+    }
+
+    /** Carbon dioxide of the settled state, mol/kg. */
+    double settledCo2() {
         Double given = request.settledCo2MgPerL();
-        return chemistry.settled(
-                dose, given == null ? before.co2() : litre.ofMilligrams(given, MolarMass.CARBON_DIOXIDE));
+        return given == null ? before.co2() : litre.ofMilligrams(given, MolarMass.CARBON_DIOXIDE);
     }
 
     double alkalinityMgPerL(double dose) {

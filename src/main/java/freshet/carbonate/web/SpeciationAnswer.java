@@ -7,6 +7,7 @@ import freshet.carbonate.CarbonateSolver;
 import freshet.carbonate.CarbonateState;
 import freshet.carbonate.CarbonateSystem;
 import freshet.carbonate.Litre;
+import freshet.carbonate.Weiss1974;
 import freshet.substance.MolarMass;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -30,6 +31,13 @@ final class SpeciationAnswer {
         CarbonateState state = state();
         double alkalinity = litre.alkalinityMgPerL(state.alkalinity());
         List<Notice> notices = WaterNotices.of(request.salinity(), request.phScale(), alkalinity);
+        if (Weiss1974.farBelowAir(state.co2(), request.temperatureC(), request.salinity())) {
+            notices.add(
+                    new Notice(
+                            "co2-below-air",
+                            "co2_mg_per_l",
+                            "Less than half of what outdoor air leaves in water: aerated it takes up CO2, and pH falls. Check the readings."));
+        }
         CarbonateSpeciationResponse response = new CarbonateSpeciationResponse(
                 state.ph(),
                 litre.milligrams(state.co2(), MolarMass.CARBON_DIOXIDE),

@@ -29,10 +29,11 @@ final class WaterNotices {
                     "In brackish water such a probe is uncertain by 0.1 in pH, CO2 by 26 %; NH3 from it reads high."));
         }
         if (salinity < AmmoniaMethod.FRESH_SALINITY && alkalinityMgPerL > HARD_MG_PER_L) {
-            notices.add(new Notice(
-                    "ionic-strength-unknown",
-                    "salinity",
-                    "Hard water at salinity 0 is solved as infinitely dilute: pH may be off by 0.02, NH3 by 4 %."));
+            notices.add(
+                    new Notice(
+                            "ionic-strength-unknown",
+                            "salinity",
+                            "Hard water at salinity 0 is solved as infinitely dilute: pH may be off by 0.02, NH3 by 4 %, a calcite index by +0.2."));
         }
         return notices;
     }

@@ -3,6 +3,8 @@ package freshet.dilution.web;
 import freshet.acidity.PhScale;
 import freshet.ammonia.AmmoniaMethod;
 import freshet.answer.Notice;
+import freshet.carbonate.CarbonateWater;
+import freshet.carbonate.Weiss1974;
 import freshet.dilution.Blend;
 import java.util.ArrayList;
 import java.util.List;
@@ -35,6 +37,7 @@ final class BlendNotices {
         chlorine();
         ammonia();
         shocks();
+        air();
         notMixed();
         salt();
         return notices;
@@ -98,6 +101,16 @@ final class BlendNotices {
                     "Temperature changes by more than temperature_change_limit_c"
                             + (degrees > HARD_TEMPERATURE_LIMIT_C ? ", and beyond the hard limit of 5 °C" : "")
                             + ": temper the water or go slower.");
+        }
+    }
+
+    private void air() {
+        CarbonateWater water = mixture.water().water();
+        if (Weiss1974.farBelowAir(mixture.settled().co2(), water.temperatureC(), water.salinity())) {
+            note(
+                    "settled-co2-below-air",
+                    "settled_co2_mg_per_l",
+                    "Less than half of what outdoor air leaves in water: pH and NH3 will settle lower than shown.");
         }
     }
 

@@ -2,6 +2,7 @@ package freshet.dilution.web;
 
 import freshet.ammonia.AmmoniaMethod;
 import freshet.carbonate.CarbonateSystem;
+import freshet.carbonate.Weiss1974;
 import freshet.dilution.Blend;
 import freshet.dilution.DilutionMode;
 import freshet.http.Calculation;
@@ -45,6 +46,7 @@ class DilutionCalculations {
                 .using(List.of(
                         Blend.METHOD,
                         CarbonateSystem.METHOD,
+                        Weiss1974.METHOD,
                         AmmoniaMethod.EMERSON_1975.dissociation().method(),
                         AmmoniaMethod.CLEGG_WHITFIELD_1995.dissociation().method()))
                 .shownBy("tank.volume_l=7000&tank.temperature_c=26&tank.ph=6.8&tank.alkalinity_mg_per_l_as_caco3=25"

@@ -47,6 +47,17 @@ class CarbonateHttpTest {
                 .body("notices.code", contains("ph-scale-assumed-nbs", "nbs-in-saline-water"));
     }
 
+    /** Weiss 1974 at 420 uatm, 25 °C: 0.63 mg/L. */
+    @Test
+    void carbonDioxideFarBelowThatOfAirIsNoticed() {
+        get("carbonate/speciation?temperature_c=25&co2_mg_per_l=0.32&ph=8").body("notices", equalTo(null));
+        get("carbonate/speciation?temperature_c=25&co2_mg_per_l=0.31&ph=8")
+                .body("notices.code", contains("co2-below-air"));
+        String dose = DOSE + "&target_ph=7.2&chemical=sodium-bicarbonate&settled_co2_mg_per_l=";
+        get(dose + "0.32").body("notices.code", not(hasItem("settled-co2-below-air")));
+        get(dose + "0.31").body("notices.code", hasItem("settled-co2-below-air"));
+    }
+
     @Test
     void whatAChemicalCannotDoIsRefusedWithTheReason() {
         unreachable("&target_ph=8.6&chemical=sodium-bicarbonate", "target_ph", "aerated tank may stand higher");

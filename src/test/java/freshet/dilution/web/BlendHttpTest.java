@@ -74,6 +74,14 @@ class BlendHttpTest {
                 .body("notices.code", hasItem("thermal-shock"));
     }
 
+    /** Weiss 1974 at 420 uatm: 0.2 mg/L is less than half of what the air leaves, in fresh water up to 40 °C. */
+    @Test
+    void aSettledStateThatAirDoesNotAllowIsNoticed() {
+        blend(TANK, SOURCE, ",\"settled_co2_mg_per_l\":0.2").body("notices.code", hasItem("settled-co2-below-air"));
+        blend(TANK, SOURCE, ",\"settled_co2_mg_per_l\":0.5")
+                .body("notices.code", not(hasItem("settled-co2-below-air")));
+    }
+
     @Test
     void faultsPointIntoTheGroups() {
         blend(TANK.replace("7.0", "11.5"), SOURCE, "")
