@@ -36,7 +36,7 @@ final class StatedRange {
     private static <R extends Record> Answer<R> noticed(Answer<R> answer) {
         List<Notice> notices = new ArrayList<>();
         for (Range range : answer.validity().exceeded()) {
-            notices.add(new Notice("outside-validity", range.quantity(), stated(range)));
+            notices.add(new Notice(FaultCode.OUTSIDE_VALIDITY.code(), range.quantity(), stated(range)));
         }
         notices.addAll(answer.notices());
         return new Answer<>(answer.result(), answer.method(), answer.validity(), notices);

@@ -162,7 +162,7 @@ class SeriesHttpTest {
     @Test
     void strictRefusesRowByRow() {
         String table = HEADER + "\n1.2,8.1,26\n1.2,8.1,55\n";
-        assertThat(csv(table, "")).contains("outside,outside-validity,");
+        assertThat(csv(table, "")).contains(",outside,,");
         assertThat(csv(table, "?strict=true")).contains(",within,,", "row 2; temperature_c: outside-validity");
     }
 

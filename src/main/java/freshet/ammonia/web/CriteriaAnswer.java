@@ -45,6 +45,12 @@ final class CriteriaAnswer {
         noteThePurpose();
         noteWhatWasNotUsed();
         noteTheConditions(acute, chronic);
+        if (chronic > acute) {
+            notices.add(new Notice(
+                    "chronic-above-acute",
+                    "chronic_tan_mg_per_l",
+                    "The published forms for these animals cross here: the acute criterion is the stricter one."));
+        }
         if (fourDay.isEmpty()) {
             notices.add(new Notice(
                     "no-four-day-criterion",

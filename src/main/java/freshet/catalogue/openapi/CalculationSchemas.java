@@ -81,7 +81,9 @@ final class CalculationSchemas {
                 "notices",
                 Schemas.describe(Schemas.listOf("Notice"), "What the reader must know; absent if there is nothing"));
         schema.addProperty(
-                "notice_codes", Schemas.text("Compact view only: the codes of the notices, joined by semicolons"));
+                "notice_codes",
+                Schemas.text(
+                        "Compact view only: the codes of the notices, joined by semicolons; outside-validity is left to validity"));
         List.of("method", "method_version", "validity").forEach(schema::addRequiredItem);
         return schema;
     }

@@ -1,16 +1,21 @@
 package freshet.http.media;
 
 import freshet.answer.Answer;
+import freshet.answer.FaultCode;
 import freshet.answer.Notice;
 import freshet.answer.Refusal;
 import freshet.http.binding.Controls.Format;
 import java.util.List;
+import java.util.stream.Collectors;
 
 /** Writes answers in one media type. */
 public interface AnswerWriter {
 
     /** How many notices an answer shows. */
     int MOST_NOTICES = 5;
+
+    /** The notice that the inputs lie outside the range of a method. */
+    String OUTSIDE = FaultCode.OUTSIDE_VALIDITY.code();
 
     /**
      * Writes an answer.
@@ -35,11 +40,15 @@ public interface AnswerWriter {
                 .subList(0, Math.min(MOST_NOTICES, answer.notices().size()));
     }
 
-    /** Their codes, joined by semicolons. */
+    /** Their codes, each once, joined by semicolons; that of the range is left to {@code validity} beside them. */
     static String codes(Answer<?> answer) {
         return answer.notices().isEmpty()
                 ? ""
-                : String.join(";", shown(answer).stream().map(Notice::code).toList());
+                : shown(answer).stream()
+                        .map(Notice::code)
+                        .filter(code -> !code.equals(OUTSIDE))
+                        .distinct()
+                        .collect(Collectors.joining(";"));
     }
 
     /** The validity as answers spell it. */

@@ -33,8 +33,9 @@ final class CborWriter implements AnswerWriter {
             members.text("reference", answer.method().citation().reference());
         }
         members.text("validity", AnswerWriter.validity(answer));
-        if (!answer.notices().isEmpty()) {
-            members.text("notice_codes", AnswerWriter.codes(answer));
+        String codes = AnswerWriter.codes(answer);
+        if (!codes.isEmpty()) {
+            members.text("notice_codes", codes);
         }
         return members.bytes();
     }

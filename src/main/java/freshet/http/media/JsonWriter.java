@@ -41,14 +41,19 @@ final class JsonWriter implements AnswerWriter {
         } else {
             JsonText.member("validity", AnswerWriter.validity(answer), out);
         }
-        List<Notice> notices = AnswerWriter.shown(answer);
-        if (!notices.isEmpty() && compact) {
-            JsonText.member("notice_codes", AnswerWriter.codes(answer), out);
-        } else if (!notices.isEmpty()) {
-            notices(notices, out);
+        if (compact) {
+            codes(AnswerWriter.codes(answer), out);
+        } else if (!answer.notices().isEmpty()) {
+            notices(AnswerWriter.shown(answer), out);
         }
         out.dropLast();
         out.put('}');
+    }
+
+    private static void codes(String codes, Bytes out) {
+        if (!codes.isEmpty()) {
+            JsonText.member("notice_codes", codes, out);
+        }
     }
 
     private byte[] signature(Method method, boolean compact) {

@@ -46,8 +46,8 @@ class AmmoniaHttpTest {
         "salinity=20&ph_scale=nbs, nbs-in-saline-water",
         "salinity=20&ph_scale=total, ''",
         "salinity=20&ph_scale=free, ''",
-        "salinity=20&method=emerson-1975&ph_scale=free, outside-validity;ph-scale-not-used",
-        "salinity=41&ph_scale=free, outside-validity",
+        "salinity=20&method=emerson-1975&ph_scale=free, ph-scale-not-used",
+        "salinity=41&ph_scale=free, ''",
     })
     void noticesTellHowThePhWasTaken(String query, String codes) {
         get(SPECIATION + "24&view=compact&" + query)
@@ -103,6 +103,11 @@ class AmmoniaHttpTest {
         String worst = "/v1/ammonia/speciation?tan_mg_per_l=9999.99&ph=13.9999&temperature_c=-1.99999&salinity=44.4444"
                 + "&method=clegg-whitfield-1995&view=compact";
         assertThat(get(worst).extract().asByteArray()).hasSizeLessThanOrEqualTo(320);
+        String deadProbe =
+                "/v1/ammonia/speciation?tan_mg_per_l=0.0512345&ph=0&temperature_c=-1.99&salinity=44.4&view=compact";
+        assertThat(get(deadProbe).extract().asByteArray()).hasSizeLessThanOrEqualTo(320);
+        String uncertain = "&ph_standard_uncertainty=0.123&temperature_standard_uncertainty_c=0.512";
+        assertThat(get(deadProbe + uncertain).extract().asByteArray()).hasSizeLessThanOrEqualTo(512);
         assertThat(get(SPECIATION + "23.4567").extract().asByteArray()).hasSizeLessThanOrEqualTo(512);
         assertThat(get("/v1/ammonia/speciation?tan_mg_per_l=0.000123456&ph=0.01&temperature_c=23.4567&salinity=33.3333"
                                 + "&ph_scale=total")

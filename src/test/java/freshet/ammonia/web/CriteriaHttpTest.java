@@ -46,6 +46,15 @@ class CriteriaHttpTest {
                 .body("notices.code", hasItem("no-four-day-criterion"));
     }
 
+    /** US EPA 2013: the forms for trout without mussels and early stages cross in cold, alkaline water. */
+    @Test
+    void aChronicCriterionAboveTheAcuteOneIsNoticed() {
+        String trout =
+                "guideline=usepa-2013&mussels_present=false&early_life_stages_present=false&temperature_c=10&ph=";
+        get(trout + "7").body("notices.code", not(hasItem("chronic-above-acute")));
+        get(trout + "8.5").body("notices.code", hasItem("chronic-above-acute"));
+    }
+
     @Test
     void outsideWhereTheyAreAppliedTheyAreMarked() {
         get("guideline=usepa-2013&ph=9.5&temperature_c=20").body("validity", equalTo("outside"));

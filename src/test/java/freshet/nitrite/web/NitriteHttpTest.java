@@ -64,8 +64,8 @@ class NitriteHttpTest {
         "no2_n_mg_per_l=107, inhibits-nitrifiers",
         "no2_n_mg_per_l=1&ph_scale=total, ph-scale-not-used",
         "no2_n_mg_per_l=1&salinity=0.5, ''",
-        "no2_n_mg_per_l=1&salinity=30, outside-validity",
-        "no2_n_mg_per_l=200&salinity=30&ph_scale=nbs, outside-validity;inhibits-nitrifiers;ph-scale-not-used",
+        "no2_n_mg_per_l=1&salinity=30, ''",
+        "no2_n_mg_per_l=200&salinity=30&ph_scale=nbs, inhibits-nitrifiers;ph-scale-not-used",
     })
     void noticesTellWhatCounts(String query, String codes) {
         get(SPECIATION + "view=compact&" + query).body("notice_codes", codes.isEmpty() ? nullValue() : equalTo(codes));

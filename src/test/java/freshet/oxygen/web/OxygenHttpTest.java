@@ -40,9 +40,9 @@ class OxygenHttpTest {
         "station_pressure_hpa=1000, ''",
         "altitude_m=0, mean-pressure-of-altitude",
         "salinity=0, sea-level-pressure-assumed",
-        "station_pressure_hpa=500, outside-validity",
-        "altitude_m=6000, outside-validity;mean-pressure-of-altitude",
-        "station_pressure_hpa=1000&salinity=41, outside-validity",
+        "station_pressure_hpa=500, ''",
+        "altitude_m=6000, mean-pressure-of-altitude",
+        "station_pressure_hpa=1000&salinity=41, ''",
     })
     void noticesTellWhichPressureWasTaken(String query, String codes) {
         get("temperature_c=20&view=compact&" + query)
