@@ -9,7 +9,6 @@ import jakarta.servlet.http.HttpServlet;
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.io.BufferedReader;
-import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.InputStreamReader;
@@ -45,12 +44,9 @@ final class BareSeries extends HttpServlet {
             case CSV -> csv(in, bytes, out);
             case NDJSON -> lines(in, bytes, out);
             case JSON -> {
-                // Held to the end, as the service must, so that a broken body is one problem.
-                ByteArrayOutputStream held = new ByteArrayOutputStream();
                 try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), in)) {
-                    json(parser, new SameBytes(Format.JSON), bytes, held);
+                    json(parser, new SameBytes(Format.JSON), bytes, out);
                 }
-                held.writeTo(out);
             }
         }
         out.write(bytes.array(), 0, bytes.length());

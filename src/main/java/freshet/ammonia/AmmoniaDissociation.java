@@ -14,6 +14,9 @@ public interface AmmoniaDissociation {
     /** Highest temperature of any answer, °C. */
     double HOTTEST_C = 60;
 
+    /** Natural logarithm of 10. */
+    double LN_10 = StrictMath.log(10);
+
     /** The published method. */
     Method method();
 
@@ -48,7 +51,12 @@ public interface AmmoniaDissociation {
 
     /** Un-ionized share at a pH and pKa on the same scale. */
     static double fraction(double pKa, double ph) {
-        return 1 / (1 + StrictMath.pow(10, pKa - ph));
+        return 1 / (1 + ammoniumPerAmmonia(pKa, ph));
+    }
+
+    /** Ammonium for each ammonia, 10^(pKa - pH); by the exponential, which costs a third of the power. */
+    static double ammoniumPerAmmonia(double pKa, double ph) {
+        return StrictMath.exp(LN_10 * (pKa - ph));
     }
 
     /** The pH at which the un-ionized share is {@code fraction}, on the scale of {@code pKa}; 0 &lt; fraction &lt; 1. */

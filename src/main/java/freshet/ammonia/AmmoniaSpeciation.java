@@ -15,7 +15,7 @@ public record AmmoniaSpeciation(double nh3NMgPerL, double nh4NMgPerL, double nh3
     /** Splits {@code tanMgPerL} of total ammonia as N. */
     public static AmmoniaSpeciation of(double tanMgPerL, Water water, AmmoniaDissociation dissociation) {
         double pKa = dissociation.pKa(water.temperatureC(), water.salinity(), water.scale());
-        double ratio = StrictMath.pow(10, pKa - water.ph());
+        double ratio = AmmoniaDissociation.ammoniumPerAmmonia(pKa, water.ph());
         double fraction = 1 / (1 + ratio);
         return new AmmoniaSpeciation(tanMgPerL * fraction, tanMgPerL * (fraction * ratio), fraction, pKa);
     }

@@ -67,7 +67,6 @@ class SeriesContractTest {
             String tagged = row(calculation).replaceFirst("}$", ",\"tag\":\"b\"}");
             Response series =
                     post(calculation, "", JSON, "{\"items\":[" + row(calculation) + "," + tagged + ",{\"no\":1}]}");
-            assertThat(series.header("Content-Length")).isEqualTo("" + series.asByteArray().length);
             JsonNode items = MAPPER.readTree(series.asString()).get("items");
             assertThat(items).hasSize(3);
             assertThat(items.get(0)).isEqualTo(single);

@@ -18,8 +18,8 @@ import java.util.List;
 import java.util.Set;
 
 /**
- * A calculation for many rows: JSON is read to its end before anything is sent, so that a body that is broken or too
- * large is one problem; CSV and NDJSON stream, each row answered as it comes.
+ * A calculation for many rows, each answered as it comes; JSON comes whole, so that a body that is broken or too large is
+ * one problem.
  *
  * @param <I> the request record
  */
@@ -68,7 +68,7 @@ public final class Series<I extends Record> {
         SeriesRequest<I> asked = SeriesRequest.fromQuery(inputs, request.getQueryString());
         SeriesControls controls = asked.controls();
         Format to = Negotiation.format(controls.format(), request.getHeader("Accept"), startingWith(from));
-        SeriesOutput out = new SeriesOutput(response, from != Format.JSON);
+        SeriesOutput out = new SeriesOutput(response);
         Rows<I> rows = asked.rows(from, results, new PromptInput(request.getInputStream(), out));
         response.setContentType(to.mediaType());
         response.setHeader("Cache-Control", "no-store");

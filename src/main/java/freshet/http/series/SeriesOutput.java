@@ -3,20 +3,17 @@ package freshet.http.series;
 import freshet.http.media.Bytes;
 import jakarta.servlet.http.HttpServletResponse;
 import java.io.IOException;
-import java.util.ArrayList;
-import java.util.List;
 
-/** The answers of a series on their way out: held to the end, or sent as they come. */
+/** The answers of a series on their way out. */
 final class SeriesOutput {
 
-    private final HttpServletResponse response;
-    private final boolean streams;
-    private final List<Bytes> held = new ArrayList<>();
-    private Bytes bytes = Parts.take();
+    private static final int FULL = 32 * 1024;
 
-    SeriesOutput(HttpServletResponse response, boolean streams) {
+    private final HttpServletResponse response;
+    private final Bytes bytes = new Bytes(FULL + 4096);
+
+    SeriesOutput(HttpServletResponse response) {
         this.response = response;
-        this.streams = streams;
     }
 
     /** Takes what comes next. */
@@ -26,37 +23,25 @@ final class SeriesOutput {
 
     /** Makes room when there is much. */
     void rowEnds() throws IOException {
-        if (bytes.length() >= Parts.FULL) {
-            if (streams) {
-                send();
-            } else {
-                held.add(bytes);
-                bytes = Parts.take();
-            }
+        if (bytes.length() >= FULL) {
+            write();
         }
     }
 
-    /** Sends what there is, unless everything is held to the end. */
+    /** Sends what there is. */
     void send() throws IOException {
-        if (streams && bytes.length() > 0) {
-            write(bytes);
-            bytes.dropTo(0);
+        if (bytes.length() > 0) {
+            write();
             response.flushBuffer();
         }
     }
 
     void end() throws IOException {
-        held.add(bytes);
-        if (!streams) {
-            response.setContentLength(held.stream().mapToInt(Bytes::length).sum());
-        }
-        for (Bytes part : held) {
-            write(part);
-        }
-        held.forEach(Parts::giveBack);
+        write();
     }
 
-    private void write(Bytes part) throws IOException {
-        response.getOutputStream().write(part.array(), 0, part.length());
+    private void write() throws IOException {
+        response.getOutputStream().write(bytes.array(), 0, bytes.length());
+        bytes.dropTo(0);
     }
 }

@@ -56,7 +56,9 @@ final class SeriesRun<I extends Record> {
             } else if (problem != null) {
                 writer.problem(rows, number, problem, out.bytes());
             }
-            out.rowEnds();
+            if (!atomic) {
+                out.rowEnds();
+            }
         }
         if (bad > 0) {
             throw new ProblemException(new Problem(
