@@ -20,6 +20,9 @@ public final class CarbonateSolver {
     /** eq/kg; in the least buffered water 5e-10 in pH. */
     private static final double ALKALINITY_ACCURACY = 1e-16;
 
+    /** mol/kg; three times what water near 0 °C holds under pure carbon dioxide of 1 atm. */
+    private static final double MOST_CO2 = 0.25;
+
     private static final double FOURTH = 4;
     private static final double HIGHEST_PH = 14;
 
@@ -48,7 +51,7 @@ public final class CarbonateSolver {
     /**
      * From pH and alkalinity, eq/kg.
      *
-     * @throws Refusal if so much alkalinity is not possible at that pH
+     * @throws Refusal if so much alkalinity is not possible at that pH, or so little
      */
     public CarbonateState ofPhAndAlkalinity(double ph, double alkalinity) {
         double hydrogen = water.hydrogen(ph, scale);
@@ -59,7 +62,14 @@ public final class CarbonateSolver {
                     "At this pH water, salt and ammonia alone have as much alkalinity as was given or more:"
                             + " no carbonate is left.");
         }
-        return state(ph, hydrogen, carbonate / water.equivalents(hydrogen));
+        CarbonateState state = state(ph, hydrogen, carbonate / water.equivalents(hydrogen));
+        if (state.co2() > MOST_CO2) {
+            throw inconsistent(
+                    "ph",
+                    "So low a pH with this alkalinity would take more carbon dioxide than water holds under any air:"
+                            + " a dead probe, or mineral acid.");
+        }
+        return state;
     }
 
     /** From pH and carbon dioxide, mol/kg. */

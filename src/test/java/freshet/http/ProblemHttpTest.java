@@ -185,6 +185,15 @@ class ProblemHttpTest {
         given().port(port).options(PATH).then().statusCode(200).header("Allow", "GET, HEAD, POST, OPTIONS");
     }
 
+    /** A bound told in another unit is rounded, and must be taken as it is told; -2 and 60 °C. */
+    @Test
+    void aBoundIsTakenAsItIsToldInAnotherUnit() {
+        get("tan_mg_per_l=1&ph=8&temperature_f=28.4").statusCode(200);
+        get("tan_mg_per_l=1&ph=8&temperature_f=140").statusCode(200);
+        get("tan_mg_per_l=1&ph=8&temperature_f=28.39").statusCode(422);
+        get("tan_mg_per_l=1&ph=8&temperature_c=60.0000001").statusCode(422);
+    }
+
     @Test
     void anUnknownPathIs404() {
         for (String path : List.of("/v1", "/v1/", "/v1/ammonia", PATH + "/", PATH + "x", "/favicon.ico")) {

@@ -11,10 +11,15 @@ import freshet.carbonate.Weiss1974;
 import freshet.quantity.Sample;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** Puts together the answer on a dose. */
 final class DoseAnswer {
+
+    private static final double ROUNDING = 1e-6;
+    /** Change of pH that a probe does not tell. */
+    private static final double SAME_PH = 0.1;
 
     private final CarbonateDoseRequest request;
     private final Sample sample;
@@ -89,8 +94,11 @@ final class DoseAnswer {
                             "steps",
                             "Never the whole dose at once: between steps let carbon dioxide recover, and measure pH and ammonia."));
         }
-        notices.addAll(calciteNotices(dose));
-        notices.addAll(WaterNotices.of(sample.salinity(), sample.phScale(), request.alkalinityMgPerLAsCaco3()));
+        notices.addAll(calciteNotices(response, dose));
+        ammonia(response).ifPresent(notices::add);
+        notices.addAll(
+                WaterNotices.of(sample.salinity(), sample.phScale(), request.alkalinityMgPerLAsCaco3(), sample.ph()));
+        settling(response, dose).ifPresent(notices::add);
         if (Weiss1974.farBelowAir(plan.settledCo2(), sample.temperatureC(), sample.salinity())) {
             notices.add(new Notice(
                     "settled-co2-below-air",
@@ -100,8 +108,55 @@ final class DoseAnswer {
         return notices;
     }
 
-    private List<Notice> calciteNotices(double dose) {
+    private Optional<Notice> ammonia(CarbonateDoseResponse response) {
+        if (request.tanMgPerL() == null) {
+            return Optional.of(new Notice(
+                    "nh3-not-judged",
+                    "tan_mg_per_l",
+                    "Total ammonia was not given: what this rise of pH makes of it is not known. Measure it first."));
+        }
+        double before = response.nh3NBeforeMgPerL().orElse(0) * (1 + ROUNDING);
+        boolean rises = Math.max(
+                        response.nh3NMgPerL().orElse(0),
+                        response.nh3NSettledMgPerL().orElse(0))
+                > before;
+        return rises
+                ? Optional.of(
+                        new Notice(
+                                "nh3-rises",
+                                "nh3_n_mg_per_l",
+                                "Toxic ammonia rises with pH, at once or when CO2 has settled: keep it below what the fish bear."))
+                : Optional.empty();
+    }
+
+    private Optional<Notice> settling(CarbonateDoseResponse response, double dose) {
+        if (request.targetPh() != null && Math.abs(response.phSettled() - request.targetPh()) > SAME_PH) {
+            return Optional.of(
+                    new Notice(
+                            "ph-settles-elsewhere",
+                            "ph_settled",
+                            "When carbon dioxide has settled, pH is near ph_settled, not target_ph: do not dose again for the rest."));
+        }
+        double step = plan.settled(plan.step(dose)).ph() - sample.ph();
+        return step > request.phRiseLimit() + ROUNDING
+                ? Optional.of(
+                        new Notice(
+                                "step-settles-higher",
+                                "max_step_g",
+                                "When carbon dioxide has settled, one step has raised pH by more than ph_rise_limit: give smaller ones."))
+                : Optional.empty();
+    }
+
+    private List<Notice> calciteNotices(CarbonateDoseResponse response, double dose) {
         List<Notice> notices = new ArrayList<>(2);
+        Double target = request.targetAlkalinityMgPerLAsCaco3();
+        if (target != null && response.alkalinityAfterMgPerLAsCaco3() < target * (1 - ROUNDING)) {
+            notices.add(
+                    new Notice(
+                            "target-not-reached",
+                            "alkalinity_after_mg_per_l_as_caco3",
+                            "The water is saturated with calcite before the target is reached: the rest of the dose does not dissolve."));
+        }
         if (request.chemical().limestone()) {
             notices.add(
                     new Notice(

@@ -30,7 +30,7 @@ final class SpeciationAnswer {
     private Answer<CarbonateSpeciationResponse> answer() {
         CarbonateState state = state();
         double alkalinity = litre.alkalinityMgPerL(state.alkalinity());
-        List<Notice> notices = WaterNotices.of(request.salinity(), request.phScale(), alkalinity);
+        List<Notice> notices = WaterNotices.of(request.salinity(), request.phScale(), alkalinity, request.ph());
         if (Weiss1974.farBelowAir(state.co2(), request.temperatureC(), request.salinity())) {
             notices.add(
                     new Notice(

@@ -11,6 +11,7 @@ import freshet.dilution.Blend;
 import freshet.dilution.BlendedWater;
 import freshet.dilution.SafeExchange;
 import freshet.method.Validity;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
@@ -66,14 +67,15 @@ final class BlendAnswer {
 
     private Answer<DilutionBlendResponse> answer() {
         SafeExchange safe = SafeExchange.of(blend, limits());
+        boolean chlorinated = BlendNotices.chlorinated(request.source());
         BlendedWater mixed = mixture.water();
         Litre litre = mixed.litre();
         double massKg = tankL * blend.tank().water().kgPerL()
                 + request.source().volumeL() * blend.source().water().kgPerL();
         double sourceL = request.source().volumeL();
         DilutionBlendResponse response = new DilutionBlendResponse(
-                safe.sharePercent(),
-                safe.limitedBy(),
+                chlorinated ? 0 : safe.sharePercent(),
+                chlorinated ? Optional.empty() : Optional.of(safe.limitedBy()),
                 nh3(blend.tank(), blend.tank().state().ph()),
                 nh3(mixed, mixed.state().ph()),
                 nh3(mixed, mixture.settled().ph()),

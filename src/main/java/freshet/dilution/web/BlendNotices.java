@@ -36,6 +36,7 @@ final class BlendNotices {
     List<Notice> all() {
         chlorine();
         ammonia();
+        limit();
         shocks();
         air();
         notMixed();
@@ -43,12 +44,25 @@ final class BlendNotices {
         return notices;
     }
 
+    /** Whether a water kills fish by its chlorine. */
+    static boolean chlorinated(WaterSample sample) {
+        return sample.allChlorineMgPerL() > CHLORINE_MG_PER_L;
+    }
+
     private void chlorine() {
-        if (request.source().allChlorineMgPerL() > CHLORINE_MG_PER_L) {
+        if (chlorinated(request.source())) {
             note(
                     "chlorine-in-source",
-                    "source.chlorine_mg_per_l_as_cl2",
-                    "Kills fish: dechlorinate the source water before it is mixed, and measure to zero.");
+                    request.source().chlorineMgPerLAsCl2() == null
+                            ? "source.chloramine_mg_per_l_as_cl2"
+                            : "source.chlorine_mg_per_l_as_cl2",
+                    "Kills fish, so no share is safe: dechlorinate the source water first, measure to zero, ask again.");
+        }
+        if (chlorinated(request.tank())) {
+            note(
+                    "chlorine-in-tank",
+                    "tank.chlorine_mg_per_l_as_cl2",
+                    "Kills fish: dechlorinate the tank at once; an exchange only thins it.");
         }
         if (WaterSample.zeroIfNone(request.source().chloramineMgPerLAsCl2()) > 0
                 || WaterSample.zeroIfNone(request.tank().chloramineMgPerLAsCl2()) > 0) {
@@ -80,6 +94,18 @@ final class BlendNotices {
                     "nh3-rises-after-aeration",
                     "nh3_n_settled_mg_per_l",
                     "Toxic ammonia rises hours later, when carbon dioxide has gone and pH with it: exchange less.");
+        }
+    }
+
+    private void limit() {
+        Double limit = request.nh3NLimitMgPerL();
+        double worse = Math.max(
+                response.nh3NMgPerL().orElse(0), response.nh3NSettledMgPerL().orElse(0));
+        if (limit != null && worse > limit * (1 + ROUNDING)) {
+            note(
+                    "nh3-above-limit",
+                    "nh3_n_limit_mg_per_l",
+                    "After this exchange toxic ammonia is above the limit given, at once or when CO2 has settled.");
         }
     }
 
@@ -156,7 +182,7 @@ final class BlendNotices {
             note(
                     "ionic-strength-unknown",
                     "salinity",
-                    "Hard water at salinity 0 is solved as infinitely dilute: pH may be off by 0.02, NH3 by 4 %.");
+                    "Hard water at salinity 0 is solved as infinitely dilute: at 200 and 400 mg/L pH may be off by 0.02 and 0.05, NH3 by 4 and 10 %.");
         }
     }
 

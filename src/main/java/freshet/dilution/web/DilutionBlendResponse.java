@@ -2,13 +2,17 @@ package freshet.dilution.web;
 
 import freshet.dilution.SafeExchange;
 import freshet.quantity.Reported;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 record DilutionBlendResponse(
-        @Reported("Largest share of source water in the full tank that keeps within the limits; may be 0")
+        @Reported(
+                "Largest share of source water in the full tank that keeps within the limits of NH3, pH and temperature, which"
+                        + " alone are judged; 0 with chlorine in the source")
         double largestSafeExchangePercent,
 
-        @Reported("What a larger one would overstep") SafeExchange.Limit limitedBy,
+        @Reported("What a larger one would overstep; left out where chlorine forbids any")
+        Optional<SafeExchange.Limit> limitedBy,
 
         @Reported("Un-ionized ammonia as N in the tank before")
         OptionalDouble nh3NBeforeMgPerL,

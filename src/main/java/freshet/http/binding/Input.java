@@ -34,6 +34,8 @@ public record Input(
         List<Spelling> spellings,
         Map<String, Object> choices) {
 
+    private static final double ROUNDING = 5e-6;
+
     /** The kinds of values. */
     public enum Kind {
         /** A number. */
@@ -103,5 +105,19 @@ public record Input(
                     case LIST -> list(text).orElseThrow();
                 })
                 .orElse(null);
+    }
+
+    /**
+     * The canonical value of {@code given}. A bound that is told in another unit has six digits: what is beyond it by less
+     * than their rounding is the bound.
+     */
+    double settled(Spelling spelling, double given) {
+        double value = spelling.canonical(given);
+        if (spelling.name().equals(name())) {
+            return value;
+        }
+        return value < minimum && value >= minimum - ROUNDING * Math.abs(minimum)
+                ? minimum
+                : value > maximum && value <= maximum + ROUNDING * Math.abs(maximum) ? maximum : value;
     }
 }

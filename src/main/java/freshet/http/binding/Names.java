@@ -36,15 +36,24 @@ public final class Names {
         return value.name().toLowerCase(Locale.ROOT).replace('_', '-');
     }
 
-    /** The known name that takes the fewest edits from {@code given}, if that is at most half of its letters. */
+    /**
+     * The known name that takes the fewest edits from {@code given}, if that is at most half of its letters. Where that are
+     * more than a slip, the first name of the same quantity goes before: what differs may be the unit.
+     */
     public static Optional<String> nearest(String given, Collection<String> known) {
         if (given.length() > 100) {
             return Optional.empty();
         }
         String folded = given.toLowerCase(Locale.ROOT).replace('-', '_').replace(' ', '_');
-        return known.stream()
+        Optional<String> nearest = known.stream()
                 .filter(name -> distance(folded, name) <= Math.max(1, given.length() / 2))
                 .min(Comparator.comparingInt(name -> distance(folded, name)));
+        String quantity = folded.replaceFirst("_.*", "_");
+        return nearest.filter(name -> distance(folded, name) <= MOST_EDITS)
+                .or(() -> known.stream()
+                        .filter(name -> folded.contains("_") && name.startsWith(quantity))
+                        .findFirst())
+                .or(() -> nearest);
     }
 
     /** The known name that {@code given} is nearly, so that it was hardly meant as a name of its own. */

@@ -30,8 +30,8 @@ final class ValueReader {
             faults.add(Wording.unreadable(entry, text));
             return null;
         }
-        double value = entry.spelling().canonical(given);
         Input input = entry.input();
+        double value = input.settled(entry.spelling(), given);
         if (value < input.minimum() || value > input.maximum()) {
             faults.add(Wording.outOfBounds(entry, text, value < input.minimum()));
             return null;

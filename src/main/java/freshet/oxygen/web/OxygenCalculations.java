@@ -16,6 +16,11 @@ import org.springframework.context.annotation.Configuration;
 @Configuration(proxyBeanMethods = false)
 class OxygenCalculations {
 
+    /** The cut of definitions of the filter; fish suffer earlier. Common practice. */
+    private static final double CRITICAL_MG_PER_L = 2;
+    /** US EPA 1986: total dissolved gas to 110 % of saturation; from memory. */
+    private static final double SUPERSATURATED_PERCENT = 110;
+
     @Bean
     Calculation<OxygenSaturationRequest, OxygenSaturationResponse> oxygenSaturation() {
         return Calculation.of(
@@ -37,6 +42,9 @@ class OxygenCalculations {
         double t = request.temperatureC();
         double saturation = BensonKrause1984.mgPerL(t, request.salinity(), pressure);
         Double measured = request.dissolvedOxygenMgPerL();
+        if (measured != null) {
+            judge(measured, 100 * measured / saturation, notices);
+        }
         Validity validity = BensonKrause1984.validity(t, request.salinity(), pressure);
         return new Answer<>(
                 new OxygenSaturationResponse(
@@ -46,6 +54,22 @@ class OxygenCalculations {
                 BensonKrause1984.METHOD,
                 validity,
                 notices);
+    }
+
+    private static void judge(double mgPerL, double percent, List<Notice> notices) {
+        if (mgPerL < CRITICAL_MG_PER_L) {
+            notices.add(
+                    new Notice(
+                            "oxygen-critical",
+                            "dissolved_oxygen_mg_per_l",
+                            "Below 2 mg/L most fish are in danger at once and nitrification fails: aerate, and check the probe."));
+        } else if (percent > SUPERSATURATED_PERCENT) {
+            notices.add(
+                    new Notice(
+                            "supersaturated",
+                            "dissolved_oxygen_mg_per_l",
+                            "Above 110 % gas bubbles can harm fish unless other gases are stripped; if this was a percent, it is not mg/L."));
+        }
     }
 
     private static double pressure(OxygenSaturationRequest request, List<Notice> notices) {

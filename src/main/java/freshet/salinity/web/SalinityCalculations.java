@@ -17,6 +17,9 @@ import org.springframework.context.annotation.Configuration;
 class SalinityCalculations {
 
     private static final double COMPENSATED_C = 25;
+    /** Salinity below which other salts than those of the sea are the rule. Common practice. */
+    private static final double FRESH = 1;
+
     private static final PracticalSalinity1978 SCALE = PracticalSalinity1978.published();
 
     @Bean
@@ -49,6 +52,13 @@ class SalinityCalculations {
         } else {
             Double measured = request.conductivityMsPerCm();
             salinity = SCALE.salinity(measured == null ? 0 : measured, t);
+        }
+        if (salinity < FRESH) {
+            notices.add(
+                    new Notice(
+                            "sea-salt-assumed",
+                            "salinity",
+                            "Holds for diluted sea water only: well water of other salts conducts too, and other calculations want salinity 0 for it."));
         }
         Validity validity = PracticalSalinity1978.validity(compensated == null ? t : COMPENSATED_C, salinity);
         return new Answer<>(

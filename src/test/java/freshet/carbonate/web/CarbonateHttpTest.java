@@ -59,6 +59,31 @@ class CarbonateHttpTest {
     }
 
     @Test
+    void aDoseTellsWhatItDoesToAmmoniaAndWherePhSettles() {
+        String high = "carbonate/dose?volume_l=10000&ph=8.3&temperature_c=25&alkalinity_mg_per_l_as_caco3=15"
+                + "&target_alkalinity_mg_per_l_as_caco3=65&chemical=sodium-bicarbonate&ph_rise_limit=0.05";
+        get(high).body("notices.code", contains("nh3-not-judged", "step-settles-higher", "settled-co2-below-air"));
+        get(high + "&tan_mg_per_l=2")
+                .body("notices.code", contains("nh3-rises", "step-settles-higher", "settled-co2-below-air"));
+        get(DOSE + "&tan_mg_per_l=1&target_ph=9&chemical=sodium-hydroxide")
+                .body(
+                        "notices.code",
+                        contains("caustic-protect-people", "dose-in-steps", "nh3-rises", "ph-settles-elsewhere"));
+        get(DOSE + "&calcium_mg_per_l=20&target_alkalinity_mg_per_l_as_caco3=400&chemical=calcium-carbonate")
+                .body("notices.code", hasItem("target-not-reached"));
+    }
+
+    @Test
+    void aDeadProbeOrMineralAcidIsNotTakenForCarbonDioxide() {
+        get("carbonate/speciation?ph=4&alkalinity_mg_per_l_as_caco3=0&temperature_c=25")
+                .body("notices.code", contains("uncertain-at-low-alkalinity"));
+        get("carbonate/speciation?ph=0&alkalinity_mg_per_l_as_caco3=0&temperature_c=25")
+                .statusCode(422)
+                .body("errors.field", contains("ph"))
+                .body("errors.code", contains("inconsistent"));
+    }
+
+    @Test
     void whatAChemicalCannotDoIsRefusedWithTheReason() {
         unreachable("&target_ph=8.6&chemical=sodium-bicarbonate", "target_ph", "aerated tank may stand higher");
         unreachable("&target_ph=6.5&chemical=sodium-hydroxide", "target_ph", "higher already");
@@ -101,7 +126,9 @@ class CarbonateHttpTest {
         get(DOSE
                         + "&target_alkalinity_mg_per_l_as_caco3=100&chemical=calcium-hydroxide&calcium_mg_per_l=60&view=compact")
                 .statusCode(200)
-                .body("notice_codes", equalTo("caustic-protect-people;dose-in-steps;calcite-may-precipitate"));
+                .body(
+                        "notice_codes",
+                        equalTo("caustic-protect-people;dose-in-steps;calcite-may-precipitate;nh3-not-judged"));
     }
 
     @Test
@@ -129,7 +156,11 @@ class CarbonateHttpTest {
                 .body("errors.code", contains("conflict"));
         get("salinity/from-conductivity?conductivity_25c_ms_per_cm=1&temperature_c=10")
                 .body("salinity.toDouble()", closeTo(0.492451, 1e-6))
-                .body("notices.code", contains("compensated-by-meter"));
+                .body("notices.code", contains("compensated-by-meter", "sea-salt-assumed"));
+        get("oxygen/saturation?temperature_c=20&station_pressure_hpa=1013&dissolved_oxygen_mg_per_l=1.9")
+                .body("notices.code", contains("oxygen-critical"));
+        get("oxygen/saturation?temperature_c=20&station_pressure_hpa=1013&dissolved_oxygen_mg_per_l=10.2")
+                .body("notices.code", contains("supersaturated"));
         get("salinity/from-conductivity?conductivity_ms_per_cm=100&temperature_c=0")
                 .statusCode(200)
                 .body("validity", equalTo("outside"));

