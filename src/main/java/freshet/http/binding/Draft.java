@@ -54,6 +54,10 @@ final class Draft<T extends Record> {
         return repeatsConstant;
     }
 
+    Shape<T> shape() {
+        return shape;
+    }
+
     Shape.@Nullable Entry entry(String name) {
         return shape.entry(name);
     }

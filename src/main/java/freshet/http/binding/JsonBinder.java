@@ -1,6 +1,7 @@
 package freshet.http.binding;
 
 import java.io.InputStream;
+import java.util.Collection;
 import org.jspecify.annotations.Nullable;
 import tools.jackson.core.JacksonException;
 import tools.jackson.core.JsonParser;
@@ -9,6 +10,8 @@ import tools.jackson.core.ObjectReadContext;
 import tools.jackson.core.StreamReadConstraints;
 import tools.jackson.core.json.JsonFactory;
 import tools.jackson.core.json.JsonReadFeature;
+import tools.jackson.core.sym.PropertyNameMatcher;
+import tools.jackson.core.util.Named;
 
 /** Reads one JSON object in one pass. */
 final class JsonBinder {
@@ -27,7 +30,14 @@ final class JsonBinder {
                     .build())
             .build();
 
+    private static final int END = PropertyNameMatcher.MATCH_END_OBJECT;
+
     private JsonBinder() {}
+
+    static PropertyNameMatcher matcher(Collection<String> names) {
+        return FACTORY.constructNameMatcher(
+                names.stream().map(Named::fromString).toList(), false);
+    }
 
     /** A parser of a document that is too large to be held. */
     static JsonParser parser(InputStream body) {
@@ -64,24 +74,40 @@ final class JsonBinder {
 
     /** Reads the rest of an object whose brace was read; its inputs have names that begin with {@code prefix}. */
     static void members(JsonParser parser, String prefix, Draft<?> inputs, @Nullable Tag tag) {
-        while (parser.nextToken() == JsonToken.PROPERTY_NAME) {
-            String name = prefix.isEmpty() ? parser.currentName() : prefix + parser.currentName();
-            Shape.Entry entry = inputs.entry(name);
-            JsonToken token = parser.nextToken();
-            if (entry != null) {
-                value(parser, token, entry, inputs);
-            } else if (tag != null && name.equals(Tag.NAME)) {
-                tag.read(parser, token, inputs.faults());
-            } else if (inputs.isGroup(name)) {
-                group(parser, name, token, inputs);
+        for (int match = name(parser, prefix, inputs); match != END; match = name(parser, prefix, inputs)) {
+            if (match >= 0) {
+                value(parser, parser.nextToken(), inputs.shape().matched(match), inputs);
             } else {
-                parser.skipChildren();
-                inputs.faults()
-                        .add(
-                                Controls.SHAPE.entry(name) == null
-                                        ? Wording.unknown(name, inputs.names())
-                                        : Wording.belongsInQuery(name));
+                other(parser, prefix + parser.currentName(), inputs, tag);
             }
+        }
+    }
+
+    /** Reads the next name; tells which input it is, if that is plain to see, or that the object ends. */
+    private static int name(JsonParser parser, String prefix, Draft<?> inputs) {
+        if (prefix.isEmpty()) {
+            int match = parser.nextNameMatch(inputs.shape().matcher());
+            return match == PropertyNameMatcher.MATCH_ODD_TOKEN ? END : match;
+        }
+        return parser.nextToken() == JsonToken.PROPERTY_NAME ? PropertyNameMatcher.MATCH_UNKNOWN_NAME : END;
+    }
+
+    private static void other(JsonParser parser, String name, Draft<?> inputs, @Nullable Tag tag) {
+        Shape.Entry entry = inputs.entry(name);
+        JsonToken token = parser.nextToken();
+        if (entry != null) {
+            value(parser, token, entry, inputs);
+        } else if (tag != null && name.equals(Tag.NAME)) {
+            tag.read(parser, token, inputs.faults());
+        } else if (inputs.isGroup(name)) {
+            group(parser, name, token, inputs);
+        } else {
+            parser.skipChildren();
+            inputs.faults()
+                    .add(
+                            Controls.SHAPE.entry(name) == null
+                                    ? Wording.unknown(name, inputs.names())
+                                    : Wording.belongsInQuery(name));
         }
     }
 

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
+import tools.jackson.core.sym.PropertyNameMatcher;
 
 /**
  * What a request record declares, read once: its inputs, the names they may be given by, and the rules between them.
@@ -24,6 +25,8 @@ public final class Shape<T extends Record> {
     private final Map<String, String> groups;
     private final @Nullable Object[] defaults;
     private final Input[] required;
+    private final Entry[] matched;
+    private final PropertyNameMatcher matcher;
 
     private Shape(Class<T> type) {
         ShapeReader reader = new ShapeReader();
@@ -39,6 +42,8 @@ public final class Shape<T extends Record> {
         rules.forEach(rule -> rule.names().forEach(this::input));
         defaults = inputs.stream().map(Input::defaultValue).toArray();
         required = inputs.stream().filter(Input::required).toArray(Input[]::new);
+        matched = entries.values().toArray(Entry[]::new);
+        matcher = JsonBinder.matcher(entries.keySet());
     }
 
     /**
@@ -87,6 +92,15 @@ public final class Shape<T extends Record> {
     @Nullable
     Entry entry(String name) {
         return entries.get(name);
+    }
+
+    /** Finds names in JSON as they are read, without making text of them: gives what {@link #matched} takes. */
+    PropertyNameMatcher matcher() {
+        return matcher;
+    }
+
+    Entry matched(int match) {
+        return matched[match];
     }
 
     /** The values when nothing is given, a new array each time. */

@@ -19,7 +19,7 @@ import java.util.OptionalDouble;
  * @param optional whether it may be left out
  * @param rows the outputs of each row, only of {@link Kind#ROWS}
  * @param choices the enumerated values, only of {@link Kind#TEXT} that is an enumeration
- * @param accessor reads it from the response record
+ * @param accessor reads it from the response record: of {@link Kind#NUMBER} as a double, of others as an object
  * @param key the name as the start of a JSON member
  */
 public record Column(
@@ -60,19 +60,11 @@ public record Column(
         return Unit.ofName(name);
     }
 
-    /**
-     * Passes the value that {@code result} has for this output on to {@code sink}.
-     *
-     * @throws Refusal if a number is too large to be printed
-     */
+    /** Passes what {@code result} has for this output, which is not a {@link Kind#NUMBER}, on to {@code sink}. */
     void read(Record result, Sink sink) {
         try {
-            if (kind == Kind.NUMBER && !optional) {
-                number((double) accessor.invokeExact(result), sink);
-            } else {
-                Object value = (Object) accessor.invokeExact(result);
-                other(value, sink);
-            }
+            Object value = (Object) accessor.invokeExact(result);
+            other(value, sink);
         } catch (RuntimeException | Error unchecked) {
             throw unchecked;
         } catch (Throwable checked) {
@@ -82,13 +74,7 @@ public record Column(
 
     @SuppressWarnings("unchecked")
     private void other(Object value, Sink sink) {
-        if (value instanceof OptionalDouble number) {
-            if (number.isPresent()) {
-                number(number.getAsDouble(), sink);
-            } else {
-                sink.absent(this);
-            }
-        } else if (value instanceof Optional<?> perhaps) {
+        if (value instanceof Optional<?> perhaps) {
             perhaps.ifPresentOrElse(present -> other(present, sink), () -> sink.absent(this));
         } else if (kind == Kind.NUMBERS || kind == Kind.MATRIX) {
             sink.numbers(this, (List<?>) value);
@@ -99,14 +85,22 @@ public record Column(
         }
     }
 
-    private void number(double value, Sink sink) {
-        if (!(Math.abs(value) < SixDigits.TOO_LARGE)) {
+    /**
+     * Passes a number, or {@link Numbers#ABSENT}, on to {@code sink}.
+     *
+     * @throws Refusal if the number is too large to be printed
+     */
+    void number(double value, Sink sink) {
+        if (Math.abs(value) < SixDigits.TOO_LARGE) {
+            sink.number(this, value);
+        } else if (Numbers.isAbsent(value)) {
+            sink.absent(this);
+        } else {
             throw new Refusal(new Fault(
                             name,
                             FaultCode.ABOVE_MAXIMUM,
                             "The result " + name + " would be 1e15 or more; no farm holds that: check the inputs.")
                     .bounds(OptionalDouble.empty(), OptionalDouble.of(SixDigits.TOO_LARGE), unit().ucum()));
         }
-        sink.number(this, value);
     }
 }

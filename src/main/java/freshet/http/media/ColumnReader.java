@@ -79,8 +79,12 @@ final class ColumnReader {
         try {
             Method method = component.getAccessor();
             method.setAccessible(true);
-            Class<?> type = component.getType() == double.class ? double.class : Object.class;
-            return MethodHandles.lookup().unreflect(method).asType(MethodType.methodType(type, Record.class));
+            MethodHandle accessor = MethodHandles.lookup().unreflect(method);
+            if (component.getType() == OptionalDouble.class) {
+                accessor = MethodHandles.filterReturnValue(accessor, Numbers.OR_ABSENT);
+            }
+            Class<?> type = accessor.type().returnType() == double.class ? double.class : Object.class;
+            return accessor.asType(MethodType.methodType(type, Record.class));
         } catch (IllegalAccessException inaccessible) {
             throw new IllegalStateException(inaccessible);
         }

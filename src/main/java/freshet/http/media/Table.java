@@ -1,5 +1,6 @@
 package freshet.http.media;
 
+import freshet.answer.Refusal;
 import java.util.Arrays;
 import java.util.List;
 import java.util.stream.Stream;
@@ -8,11 +9,13 @@ import java.util.stream.Stream;
 public final class Table {
 
     private final Column[] columns;
+    private final Numbers numbers;
 
     private Table(Class<? extends Record> type) {
         columns = Arrays.stream(type.getRecordComponents())
                 .map(ColumnReader::read)
                 .toArray(Column[]::new);
+        numbers = new Numbers(columns);
     }
 
     /**
@@ -40,10 +43,20 @@ public final class Table {
         return Arrays.stream(columns).allMatch(Column::single);
     }
 
-    /** Passes all values of {@code result} on to {@code sink}. */
+    /**
+     * Passes all values of {@code result} on to {@code sink}.
+     *
+     * @throws Refusal if a number is too large to be printed
+     */
     void read(Record result, Sink sink) {
+        double[] values = numbers.of(result);
+        int next = 0;
         for (Column column : columns) {
-            column.read(result, sink);
+            if (column.kind() == Column.Kind.NUMBER) {
+                column.number(values[next++], sink);
+            } else {
+                column.read(result, sink);
+            }
         }
     }
 }
