@@ -104,6 +104,31 @@ class AlarmSetpointsHttpTest {
     }
 
     @Test
+    void whenAmmoniaIsAboveCriticalTheHighAlarmOfPhStays() {
+        get("profile=warm-water&ph=8&temperature_c=28&tan_mg_per_l=20&variables=ph")
+                .statusCode(200)
+                .body("ph_high_high.toDouble()", lessThan(8.0))
+                .body("notices[0].code", equalTo("ammonia-above-critical"))
+                .body("notices.code", not(hasItem("uncertainty-too-large")));
+    }
+
+    @Test
+    void limitsInTheWrongOrderAreRefusedAllAtOnce() {
+        get("ph=8&temperature_c=20&nh3_n_critical_mg_per_l=0.02&nh3_n_caution_mg_per_l=0.05"
+                        + "&dissolved_oxygen_caution_mg_per_l=3&dissolved_oxygen_critical_mg_per_l=5")
+                .statusCode(422)
+                .body("errors.field", contains("nh3_n_caution_mg_per_l", "dissolved_oxygen_caution_mg_per_l"))
+                .body("errors.code", contains("inconsistent", "inconsistent"));
+    }
+
+    @Test
+    void nitriteWithoutChlorideIsWarnedOf() {
+        String cold = "profile=cold-water&ph=7.4&temperature_c=12&variables=no2_n";
+        get(cold).body("notices.code", hasItem("chloride-not-given"));
+        get(cold + "&chloride_mg_per_l=50").body("notices.code", not(hasItem("chloride-not-given")));
+    }
+
+    @Test
     void aControllerCanHoldTheAnswer() {
         String compact = get("ph=7.4&temperature_c=26&profile=warm-water&tan_mg_per_l=2&view=compact"
                         + "&variables=tan,ph,temperature,dissolved_oxygen")

@@ -16,8 +16,14 @@ final class LimitTableHeader {
              * and at most %s %% below. A table never replaces a reading; it holds for one salinity.
              * Method: %s, version %s. %s
              */
-            #ifndef FRESHET_TAN_LIMIT_H
+            #ifdef FRESHET_TAN_LIMIT_H
+            #error "Two tables of limits in one file: the second would be taken for the first"
+            #endif
             #define FRESHET_TAN_LIMIT_H
+
+            #ifdef __FAST_MATH__
+            #error "With -ffast-math a reading that is not a number would pass for a safe one"
+            #endif
 
             #define FRESHET_PH_COUNT %d
             #define FRESHET_TEMPERATURE_COUNT %d
@@ -35,7 +41,8 @@ final class LimitTableHeader {
             };
 
             /* Limit of total ammonia as N, mg/L. Below the first node the edge holds; above the last, or for what is not a
-             * number, it is 0, so that every comparison raises an alarm. */
+             * number, it is 0, so that every comparison raises an alarm. A reading that no water has, as 0 or -127, comes
+             * from a broken sensor: look for that before. */
             static inline float freshet_tan_limit_mg_per_l(float ph, float temperature_c) {
                 float y, x, low, high;
                 int row, column;
@@ -57,8 +64,6 @@ final class LimitTableHeader {
                     + x * (freshet_tan_limit[row + 1][column + 1] - freshet_tan_limit[row + 1][column]);
                 return low + y * (high - low);
             }
-
-            #endif
             """;
 
     private LimitTableHeader() {}

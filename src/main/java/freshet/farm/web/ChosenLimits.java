@@ -6,7 +6,6 @@ import freshet.answer.Refusal;
 import freshet.farm.AlarmProfile;
 import freshet.farm.AlarmVariable;
 import freshet.farm.LimitPair;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import org.jspecify.annotations.Nullable;
@@ -54,12 +53,12 @@ record ChosenLimits(
                             "Give a profile, or limits of your own such as nh3_n_critical_mg_per_l.")
                     .allowing(NAMES));
         }
-        List<Fault> missing = new ArrayList<>();
+        List<Fault> faults = own.outOfOrder();
         if (variables.size() < AlarmVariable.values().length) {
-            variables.stream().filter(this::without).forEach(variable -> missing.add(missing(variable)));
+            variables.stream().filter(this::without).forEach(variable -> faults.add(missing(variable)));
         }
-        if (!missing.isEmpty()) {
-            throw new Refusal(missing);
+        if (!faults.isEmpty()) {
+            throw new Refusal(faults);
         }
     }
 

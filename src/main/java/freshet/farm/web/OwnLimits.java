@@ -1,5 +1,7 @@
 package freshet.farm.web;
 
+import freshet.answer.Fault;
+import freshet.answer.FaultCode;
 import freshet.farm.LimitPair;
 import freshet.quantity.Alkalinity;
 import freshet.quantity.Concentration;
@@ -8,6 +10,8 @@ import freshet.quantity.Nitrate;
 import freshet.quantity.Nitrite;
 import freshet.quantity.Ph;
 import freshet.quantity.Temperature;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.OptionalDouble;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
@@ -81,6 +85,45 @@ record OwnLimits(
                         oxygen(),
                         alkalinity())
                 .anyMatch(pair -> !pair.none());
+    }
+
+    /** Cautions that do not come before their critical alarm. */
+    List<Fault> outOfOrder() {
+        List<Fault> faults = new ArrayList<>();
+        below("nh3_n_caution_mg_per_l", nh3NCautionMgPerL, nh3NCriticalMgPerL, faults);
+        below("no2_n_caution_mg_per_l", no2NCautionMgPerL, no2NCriticalMgPerL, faults);
+        below("no3_n_caution_mg_per_l", no3NCautionMgPerL, no3NCriticalMgPerL, faults);
+        below("ph_upper_caution", phUpperCaution, phUpperCritical, faults);
+        below("temperature_upper_caution_c", temperatureUpperCautionC, temperatureUpperCriticalC, faults);
+        above("ph_lower_caution", phLowerCaution, phLowerCritical, faults);
+        above("temperature_lower_caution_c", temperatureLowerCautionC, temperatureLowerCriticalC, faults);
+        above("dissolved_oxygen_caution_mg_per_l", dissolvedOxygenCautionMgPerL, dissolvedOxygenCriticalMgPerL, faults);
+        above(
+                "alkalinity_caution_mg_per_l_as_caco3",
+                alkalinityCautionMgPerLAsCaco3,
+                alkalinityCriticalMgPerLAsCaco3,
+                faults);
+        return faults;
+    }
+
+    private static void below(String name, @Nullable Double caution, @Nullable Double critical, List<Fault> faults) {
+        if (caution != null && critical != null && caution >= critical) {
+            faults.add(outOfOrder(name, "below"));
+        }
+    }
+
+    private static void above(String name, @Nullable Double caution, @Nullable Double critical, List<Fault> faults) {
+        if (caution != null && critical != null && caution <= critical) {
+            faults.add(outOfOrder(name, "above"));
+        }
+    }
+
+    private static Fault outOfOrder(String name, String side) {
+        return new Fault(
+                name,
+                FaultCode.INCONSISTENT,
+                name + " must lie " + side + " " + name.replace("caution", "critical")
+                        + ": a caution comes before the critical alarm.");
     }
 
     LimitPair ammonia() {

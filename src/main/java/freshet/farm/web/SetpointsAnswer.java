@@ -21,6 +21,8 @@ final class SetpointsAnswer {
     private static final double CAUTION_SHARE = 0.8;
 
     private static final double CAUTION_INSIDE_PH = 0.2;
+    /** Salinity from which chloride, more than 2500 mg/L of it, binds no limit of nitrite. */
+    private static final double MUCH_CHLORIDE_SALINITY = 5;
 
     private final AlarmSetpointsRequest request;
     private final SensorUncertainties sensors;
@@ -135,7 +137,15 @@ final class SetpointsAnswer {
                         LimitPair.of(Math.min(pair.caution().orElse(bound), CAUTION_SHARE * bound), bound),
                         StrictMath.sqrt(r * r + c * c));
             }
-        } else if (chloride != null) {
+        } else if (profile != null
+                && watched(AlarmVariable.NO2_N)
+                && request.sample().salinity() < MUCH_CHLORIDE_SALINITY) {
+            notices.add(
+                    new Notice(
+                            "chloride-not-given",
+                            "chloride_mg_per_l",
+                            "In water poor in chloride nitrite kills far below the profile's limit: measure chloride, and give it."));
+        } else if (chloride != null && profile == null) {
             notices.add(new Notice(
                     "input-not-used",
                     "chloride_mg_per_l",
@@ -182,7 +192,9 @@ final class SetpointsAnswer {
     }
 
     private Band ph() {
+        LimitPair lower = limits.phLower();
         LimitPair upper = limits.phUpper();
+        double guardBand = GuardBand.Z * sensors.phStandardUncertainty();
         Double tan = request.tanMgPerL();
         OptionalDouble critical = limits.ammonia().critical();
         if (tan != null && critical.isPresent() && watched(AlarmVariable.PH)) {
@@ -194,9 +206,22 @@ final class SetpointsAnswer {
                         "ph-bound-by-ammonia",
                         "ph_high_high",
                         "At this pH the present total ammonia meets its critical limit: pH is the live alarm."));
+                if (bound < request.sample().ph()) {
+                    notices.add(
+                            0,
+                            new Notice(
+                                    "ammonia-above-critical",
+                                    "tan_mg_per_l",
+                                    "The total ammonia given is above its critical limit at the pH given, now: act, do not wait for alarms."));
+                }
+                if (bound - CAUTION_INSIDE_PH - guardBand
+                        <= lower.caution().orElse(Double.NEGATIVE_INFINITY) + guardBand) {
+                    // The high alarm is the one that saves the fish; no pH is left between it and the low one.
+                    lower = LimitPair.NONE;
+                }
             }
         }
-        return twoSided(AlarmVariable.PH, limits.phLower(), upper, sensors.phStandardUncertainty(), GuardBand.LEAST_PH);
+        return twoSided(AlarmVariable.PH, lower, upper, sensors.phStandardUncertainty(), GuardBand.LEAST_PH);
     }
 
     private Band twoSided(AlarmVariable variable, LimitPair lower, LimitPair upper, double u, double floor) {
