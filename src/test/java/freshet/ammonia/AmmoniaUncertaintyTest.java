@@ -19,4 +19,15 @@ class AmmoniaUncertaintyTest {
         double withOther = Math.sqrt(u * u + k * k * (0.01 * 0.01 - 0.005 * 0.005));
         assertThat(withOther).isCloseTo(0.126, within(0.0005));
     }
+
+    /** Near the limit of detection: total ammonia 0.02 +- 0.1 mg/L is 0 to 0.216. */
+    @Test
+    void boundsOfTotalAmmoniaAloneAreThoseOfANormalError() {
+        AmmoniaUncertainty.Bounds near = AmmoniaUncertainty.bounds(5, 5);
+        assertThat(near.lower()).isZero();
+        assertThat(near.upper()).isCloseTo(1 + 1.96 * 5, within(1e-12));
+        AmmoniaUncertainty.Bounds far = AmmoniaUncertainty.bounds(0.1, 0.1);
+        assertThat(far.lower()).isCloseTo(1 - 0.196, within(1e-12));
+        assertThat(far.upper()).isCloseTo(1.196, within(1e-12));
+    }
 }

@@ -14,7 +14,7 @@ import freshet.method.Method;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
-import java.util.OptionalDouble;
+import java.util.Optional;
 import java.util.stream.Stream;
 import org.springframework.context.annotation.Bean;
 import org.springframework.context.annotation.Configuration;
@@ -108,7 +108,7 @@ class AmmoniaCalculations {
         AmmoniaSpeciation speciation = AmmoniaSpeciation.of(request.tanMgPerL(), choice.water(), choice.dissociation());
         if (!request.namesUncertainty()) {
             return new Answer<>(
-                    AmmoniaSpeciationResponse.of(speciation, OptionalDouble.empty()),
+                    AmmoniaSpeciationResponse.of(speciation, Optional.empty()),
                     choice.dissociation().method(),
                     choice.validity(),
                     choice.notices());

@@ -1,10 +1,10 @@
 package freshet.ammonia.web;
 
 import freshet.ammonia.AmmoniaSpeciation;
-import freshet.ammonia.AmmoniaUncertainty;
 import freshet.quantity.Reported;
+import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.function.DoubleUnaryOperator;
+import java.util.function.ToDoubleFunction;
 
 record AmmoniaSpeciationResponse(
         @Reported("Un-ionized ammonia, the toxic form, as N")
@@ -29,8 +29,9 @@ record AmmoniaSpeciationResponse(
         @Reported("Upper bound of un-ionized ammonia as N, of an interval of 95 %")
         OptionalDouble nh3NUpperMgPerL) {
 
-    /** With the relative standard uncertainty of un-ionized ammonia, where it is asked for. */
-    static AmmoniaSpeciationResponse of(AmmoniaSpeciation speciation, OptionalDouble relative) {
+    /** With the uncertainty of un-ionized ammonia, where it is asked for. */
+    static AmmoniaSpeciationResponse of(
+            AmmoniaSpeciation speciation, Optional<SpeciationUncertainty.Relative> relative) {
         return new AmmoniaSpeciationResponse(
                 speciation.nh3NMgPerL(),
                 speciation.nh3MgPerL(),
@@ -38,15 +39,17 @@ record AmmoniaSpeciationResponse(
                 speciation.nh4MgPerL(),
                 speciation.nh3Fraction(),
                 speciation.pKa(),
-                times(speciation, relative, u -> u),
-                times(speciation, relative, u -> 1 / AmmoniaUncertainty.factor(u)),
-                times(speciation, relative, AmmoniaUncertainty::factor));
+                times(speciation, relative, SpeciationUncertainty.Relative::all),
+                times(speciation, relative, known -> known.bounds().lower()),
+                times(speciation, relative, known -> known.bounds().upper()));
     }
 
     private static OptionalDouble times(
-            AmmoniaSpeciation speciation, OptionalDouble relative, DoubleUnaryOperator factor) {
+            AmmoniaSpeciation speciation,
+            Optional<SpeciationUncertainty.Relative> relative,
+            ToDoubleFunction<SpeciationUncertainty.Relative> factor) {
         return relative.isEmpty()
-                ? relative
-                : OptionalDouble.of(speciation.nh3NMgPerL() * factor.applyAsDouble(relative.getAsDouble()));
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(speciation.nh3NMgPerL() * factor.applyAsDouble(relative.get()));
     }
 }

@@ -4,25 +4,37 @@ import freshet.ammonia.AmmoniaUncertainty;
 import freshet.answer.Notice;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.OptionalDouble;
+import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 
 /** The uncertainty of one speciation, from what the caller knows of his sensors. */
 record SpeciationUncertainty(AmmoniaSpeciationRequest request, DissociationChoice choice) {
 
-    /** Relative to un-ionized ammonia; empty where there is none. */
-    OptionalDouble relative() {
-        double tan = request.tanMgPerL();
-        if (tan == 0) {
-            return OptionalDouble.empty();
+    /**
+     * Standard uncertainties relative to their values.
+     *
+     * @param all of un-ionized ammonia
+     * @param tan of total ammonia, a part of it
+     */
+    record Relative(double all, double tan) {
+
+        AmmoniaUncertainty.Bounds bounds() {
+            return AmmoniaUncertainty.bounds(all, tan);
         }
-        return OptionalDouble.of(AmmoniaUncertainty.relative(
+    }
+
+    /** Relative to the values; empty where there is no ammonia. */
+    Optional<Relative> relative() {
+        if (request.tanMgPerL() == 0) {
+            return Optional.empty();
+        }
+        double tan = known(request.tanStandardUncertaintyMgPerL()) / request.tanMgPerL();
+        double all = AmmoniaUncertainty.relative(
                 choice.water(),
                 choice.dissociation(),
                 new AmmoniaUncertainty.Sensors(
-                        known(request.tanStandardUncertaintyMgPerL()) / tan,
-                        known(request.phStandardUncertainty()),
-                        known(request.temperatureStandardUncertaintyC()))));
+                        tan, known(request.phStandardUncertainty()), known(request.temperatureStandardUncertaintyC())));
+        return Optional.of(new Relative(all, tan));
     }
 
     private static double known(@Nullable Double uncertainty) {
