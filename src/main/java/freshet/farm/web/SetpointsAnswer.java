@@ -16,7 +16,6 @@ import java.util.OptionalDouble;
 /** Puts together the answer on alarm set-points. */
 final class SetpointsAnswer {
 
-    private static final OptionalDouble NONE = OptionalDouble.empty();
     /** How far a caution limit lies inside a critical one that neither profile nor caller has paired with it. */
     private static final double CAUTION_SHARE = 0.8;
 
@@ -29,11 +28,13 @@ final class SetpointsAnswer {
     private final ChosenLimits limits;
     private final GuardBand guard;
     private final List<Notice> notices = new ArrayList<>();
+    private final GuardedBands bands;
 
     private SetpointsAnswer(AlarmSetpointsRequest request) {
         this.request = request;
         sensors = request.uncertainties();
         limits = new ChosenLimits(request);
+        bands = new GuardedBands(request.variables(), notices);
         Sample sample = request.sample();
         guard = new GuardBand(new Water(sample.ph(), sample.temperatureC(), sample.salinity(), sample.scale()));
     }
@@ -45,30 +46,31 @@ final class SetpointsAnswer {
     private Answer<AlarmSetpointsResponse> answer() {
         Band tan = tan();
         Band nitrite = nitrite();
-        Band nitrate = concentration(
+        Band nitrate = bands.concentration(
                 AlarmVariable.NO3_N, limits.nitrate(), sensors.no3NRelativeStandardUncertaintyPercent() / 100);
         Band ph = ph();
-        Band temperature = twoSided(
+        Band temperature = bands.twoSided(
                 AlarmVariable.TEMPERATURE,
                 limits.temperatureLower(),
                 limits.temperatureUpper(),
                 sensors.temperatureStandardUncertaintyC(),
                 GuardBand.LEAST_TEMPERATURE_C);
-        Band oxygen = low(
+        Band oxygen = bands.low(
                 AlarmVariable.DISSOLVED_OXYGEN,
                 limits.oxygen(),
                 sensors.dissolvedOxygenStandardUncertaintyMgPerL(),
                 GuardBand.LEAST_OXYGEN,
                 0);
-        Band alkalinity = low(
+        Band alkalinity = bands.low(
                 AlarmVariable.ALKALINITY,
                 limits.alkalinity(),
                 0,
                 0,
                 sensors.alkalinityRelativeStandardUncertaintyPercent() / 100);
-        RefreshValues refresh = watched(AlarmVariable.TAN) && !limits.ammonia().none()
-                ? RefreshValues.of(guard, request.refreshPercent() / 100, notices)
-                : RefreshValues.NOTHING;
+        RefreshValues refresh =
+                bands.watched(AlarmVariable.TAN) && !limits.ammonia().none()
+                        ? RefreshValues.of(guard, request.refreshPercent() / 100, notices)
+                        : RefreshValues.NOTHING;
         conditional();
         AlarmSetpointsResponse response = new AlarmSetpointsResponse(
                 tan.high(),
@@ -110,17 +112,13 @@ final class SetpointsAnswer {
                 notices);
     }
 
-    private boolean watched(AlarmVariable variable) {
-        return request.variables().contains(variable);
-    }
-
     private Band tan() {
         double u = guard.relativeUncertainty(
                 sensors.tanRelativeStandardUncertaintyPercent() / 100,
                 sensors.phStandardUncertainty(),
                 sensors.temperatureStandardUncertaintyC());
         LimitPair guarded = limits.ammonia().times(StrictMath.exp(-GuardBand.Z * u) / guard.fraction());
-        return high(AlarmVariable.TAN, guarded, sensors.tanRelativeStandardUncertaintyPercent() / 100);
+        return bands.high(AlarmVariable.TAN, guarded, sensors.tanRelativeStandardUncertaintyPercent() / 100);
     }
 
     private Band nitrite() {
@@ -132,13 +130,13 @@ final class SetpointsAnswer {
             double bound = chloride / profile.chlorideRatio();
             if (bound < pair.critical().orElse(0)) {
                 double c = sensors.chlorideRelativeStandardUncertaintyPercent() / 100;
-                return concentration(
+                return bands.concentration(
                         AlarmVariable.NO2_N,
                         LimitPair.of(Math.min(pair.caution().orElse(bound), CAUTION_SHARE * bound), bound),
                         StrictMath.sqrt(r * r + c * c));
             }
         } else if (profile != null
-                && watched(AlarmVariable.NO2_N)
+                && bands.watched(AlarmVariable.NO2_N)
                 && request.sample().salinity() < MUCH_CHLORIDE_SALINITY) {
             notices.add(
                     new Notice(
@@ -151,44 +149,7 @@ final class SetpointsAnswer {
                     "chloride_mg_per_l",
                     "With limits of your own there is no ratio to use chloride with."));
         }
-        return concentration(AlarmVariable.NO2_N, pair, r);
-    }
-
-    private Band concentration(AlarmVariable variable, LimitPair pair, double r) {
-        return high(variable, pair.times(StrictMath.exp(-GuardBand.Z * r)), r);
-    }
-
-    private Band high(AlarmVariable variable, LimitPair guarded, double r) {
-        if (!watched(variable) || guarded.none()) {
-            return Band.NOTHING;
-        }
-        double high = guarded.caution().orElse(guarded.critical().orElse(0));
-        if (!(high > 0)
-                || guarded.critical().isPresent()
-                        && guarded.critical().getAsDouble() <= high
-                        && guarded.caution().isPresent()) {
-            return crossed(variable);
-        }
-        double deadband = Math.max(2 * r * high, GuardBand.LEAST_SHARE * high);
-        return new Band(NONE, NONE, guarded.caution(), guarded.critical(), OptionalDouble.of(deadband));
-    }
-
-    private Band low(AlarmVariable variable, LimitPair pair, double u, double floor, double r) {
-        if (!watched(variable) || pair.none()) {
-            return Band.NOTHING;
-        }
-        LimitPair guarded = pair.plus(GuardBand.Z * u).times(1 + GuardBand.Z * r);
-        double low = guarded.caution().orElse(guarded.critical().orElse(0));
-        if (!(low > 0)
-                || guarded.critical().isPresent()
-                        && guarded.critical().getAsDouble() >= low
-                        && guarded.caution().isPresent()) {
-            return crossed(variable);
-        }
-        double deadband = r > 0
-                ? Math.max(2 * r * low, GuardBand.LEAST_SHARE * low)
-                : Math.max(2 * u, floor > 0 ? floor : GuardBand.LEAST_SHARE * low);
-        return new Band(guarded.critical(), guarded.caution(), NONE, NONE, OptionalDouble.of(deadband));
+        return bands.concentration(AlarmVariable.NO2_N, pair, r);
     }
 
     private Band ph() {
@@ -197,7 +158,7 @@ final class SetpointsAnswer {
         double guardBand = GuardBand.Z * sensors.phStandardUncertainty();
         Double tan = request.tanMgPerL();
         OptionalDouble critical = limits.ammonia().critical();
-        if (tan != null && critical.isPresent() && watched(AlarmVariable.PH)) {
+        if (tan != null && critical.isPresent() && bands.watched(AlarmVariable.PH)) {
             double share = critical.getAsDouble() / tan;
             double bound = share > 0 && share < 1 ? guard.phAt(share) : Double.POSITIVE_INFINITY;
             if (bound < upper.critical().orElse(Double.POSITIVE_INFINITY)) {
@@ -221,29 +182,11 @@ final class SetpointsAnswer {
                 }
             }
         }
-        return twoSided(AlarmVariable.PH, lower, upper, sensors.phStandardUncertainty(), GuardBand.LEAST_PH);
-    }
-
-    private Band twoSided(AlarmVariable variable, LimitPair lower, LimitPair upper, double u, double floor) {
-        if (!watched(variable) || lower.none() && upper.none()) {
-            return Band.NOTHING;
-        }
-        LimitPair low = lower.plus(GuardBand.Z * u);
-        LimitPair high = upper.plus(-GuardBand.Z * u);
-        Band band = new Band(low.critical(), low.caution(), high.caution(), high.critical(), NONE);
-        return band.inOrder() ? band.withDeadband(Math.max(2 * u, floor)) : crossed(variable);
-    }
-
-    private Band crossed(AlarmVariable variable) {
-        notices.add(new Notice(
-                "uncertainty-too-large",
-                ChosenLimits.name(variable),
-                "The sensor is too uncertain for these limits: after guarding the alarms cross or vanish. Calibrate."));
-        return Band.NOTHING;
+        return bands.twoSided(AlarmVariable.PH, lower, upper, sensors.phStandardUncertainty(), GuardBand.LEAST_PH);
     }
 
     private void conditional() {
-        if (watched(AlarmVariable.TAN)) {
+        if (bands.watched(AlarmVariable.TAN)) {
             notices.add(new Notice(
                     "limit-conditional",
                     "tan_high_mg_per_l",
